@@ -1,0 +1,3 @@
+grammar Network;
+statement: NAME EOF;
+NAME: [a-z]+;

@@ -1,0 +1,5 @@
+/** Arguments, files, streams and exit status. */
+@NullMarked
+package loadmark.cli;
+
+import org.jspecify.annotations.NullMarked;
