@@ -1,0 +1,24 @@
+package loadmark.diagnostic;
+
+import java.util.Comparator;
+import java.util.Optional;
+
+/**
+ * Something to tell the user about what they wrote.
+ *
+ * @param code names the kind of slip, in words joined by hyphens; fixed once published
+ * @param message what is wrong, one sentence without the full stop
+ * @param hint what to do
+ */
+public record Finding(
+    Severity severity, String code, Span place, String message, Optional<String> hint) {
+
+  /** By line, then column, then in the order found. */
+  public static final Comparator<Finding> BY_PLACE =
+      Comparator.<Finding>comparingInt(f -> f.place().line())
+          .thenComparingInt(f -> f.place().column());
+
+  public boolean isError() {
+    return severity == Severity.ERROR;
+  }
+}

@@ -1,0 +1,5 @@
+/** Network to compiled nodal equations, once a topology. */
+@NullMarked
+package loadmark.equation;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,35 @@
+package loadmark.network;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * A two-terminal part between two nodes.
+ *
+ * @param kind the statement's word: {@code resistor}, {@code capacitor}, …
+ * @param text the value as the user wrote it
+ * @param rated in W for a resistor, V for a capacitor
+ * @param line where it is declared, from 1
+ */
+public record Part(
+    String name,
+    String kind,
+    Node first,
+    Node second,
+    OnePort value,
+    String text,
+    OptionalDouble rated,
+    int line) {
+
+  /** The value of the element that the statement names, without what its properties add. */
+  public Optional<OnePort.Element> findMainElement() {
+    return first(value);
+  }
+
+  private static Optional<OnePort.Element> first(OnePort one) {
+    if (one instanceof OnePort.Element element) {
+      return Optional.of(element);
+    }
+    return one instanceof OnePort.Series series ? first(series.members().get(0)) : Optional.empty();
+  }
+}

@@ -1,0 +1,9 @@
+package loadmark.quantity;
+
+/**
+ * A value with its dimension.
+ *
+ * @param value in SI base units; an angle in radians, a level in decibels, a ratio as a plain
+ *     number
+ */
+public record Quantity(double value, Dimension dimension) {}
