@@ -1,0 +1,7 @@
+package loadmark.binding;
+
+/** What the network is bound for. Stand-in. */
+public enum Purpose {
+  CHECK,
+  CURVE
+}
