@@ -30,8 +30,7 @@ public final class Judge {
           double hz = limit.scope().get(0).fromHz();
           Loading there = responses.apply(port).compare(one.loads(), one.against()).at(hz);
           double value = there.change().magnitude();
-          Verdict said =
-              value > limit.bound().atMost().orElse(1e9) ? Verdict.BROKEN : Verdict.KEPT;
+          Verdict said = value > limit.bound().atMost().orElse(1e9) ? Verdict.BROKEN : Verdict.KEPT;
           Worst worst =
               new Worst(
                   hz,
