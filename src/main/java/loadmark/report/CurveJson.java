@@ -15,6 +15,8 @@ public final class CurveJson {
   private CurveJson() {}
 
   /**
+   * One file's curves.
+   *
    * @param file as the user gave it; empty where the command line names none
    * @param table empty where there is no curve
    * @param diagnostics on the command line and on the file
