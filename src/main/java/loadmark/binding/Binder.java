@@ -2,6 +2,7 @@ package loadmark.binding;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import loadmark.diagnostic.Findings;
 import loadmark.network.Band;
 import loadmark.network.Bound;
@@ -13,6 +14,7 @@ import loadmark.network.Network;
 import loadmark.network.Node;
 import loadmark.network.OnePort;
 import loadmark.network.OnePort.ElementKind;
+import loadmark.network.Part;
 import loadmark.network.Port;
 import loadmark.network.Sweep;
 import loadmark.syntax.Expression;
@@ -29,7 +31,7 @@ public final class Binder {
     }
     Node ground = new Node(0, "ground");
     Node in = new Node(1, "in");
-    Port port = new Port("input", in, ground, new Port.Closure.Open(), 1);
+    Port port = new Port("input", in, ground, new Port.Closure.Open(), 4);
     Load load =
         new Load(
             "meter",
@@ -38,10 +40,10 @@ public final class Binder {
             ground,
             OnePort.of(ElementKind.RESISTANCE, 900),
             "900 Ω",
-            2);
+            5);
     Case alone = new Case("meter", List.of(load), List.of(), 0);
     Band band = new Band(10, 1e6);
-    double most = file.source().text().contains("kept") ? 0.2 : 0.02;
+    double most = file.source().text().contains("20 %") ? 0.2 : 0.02;
     Limit limit =
         new Limit(
             Criterion.CHANGE,
@@ -51,8 +53,8 @@ public final class Binder {
             List.of(band),
             List.of(alone),
             List.of(port),
-            3,
-            "limit change " + most * 100 + " %");
+            7,
+            most == 0.2 ? "limit change 20 %" : "limit change 2 %");
     if (file.source().text().contains("warned")) {
       findings.warning("loose-node", file.source().whole(), "a warning");
     }
@@ -60,13 +62,22 @@ public final class Binder {
         new Network(
             "Stand-in",
             List.of(ground, in),
-            List.of(),
+            List.of(
+                new Part(
+                    "source",
+                    "resistor",
+                    in,
+                    ground,
+                    OnePort.of(ElementKind.RESISTANCE, 100),
+                    "100 Ω",
+                    OptionalDouble.empty(),
+                    2)),
             List.of(),
             List.of(port),
             List.of(load),
             List.of(alone),
             List.of(limit),
-            Optional.of(new Sweep(false, Optional.of(band), 101, 4))));
+            Optional.of(new Sweep(false, Optional.of(band), 101, 6))));
   }
 
   public static List<Double> frequencies(List<Expression> expressions, Findings findings) {
