@@ -11,8 +11,8 @@ import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 import java.util.Optional;
-import loadmark.diagnostic.Decoder;
 import loadmark.diagnostic.Findings;
+import loadmark.diagnostic.SourceReader;
 import loadmark.diagnostic.SourceText;
 import loadmark.study.Source;
 
@@ -20,8 +20,8 @@ import loadmark.study.Source;
 final class Inputs {
   static final String STANDARD_INPUT = "-";
 
-  /** More bytes than this are no network file; devices that never end are stopped by it too. */
-  static final int MOST_BYTES = 16 << 20;
+  /** One byte past what is read: devices that never end are stopped by it too. */
+  private static final int ENOUGH = SourceReader.MOST_BYTES + 1;
 
   private final InputStream in;
 
@@ -33,27 +33,24 @@ final class Inputs {
   Optional<Source> read(String name, Findings findings) {
     Optional<byte[]> bytes = readBytes(name, findings);
     return bytes.flatMap(
-        all -> Decoder.decode(name, all, findings).map(text -> new Source(text, sha256(all))));
+        all -> SourceReader.decode(name, all, findings).map(text -> new Source(text, sha256(all))));
   }
 
   private Optional<byte[]> readBytes(String name, Findings findings) {
     try {
       byte[] bytes;
       if (name.equals(STANDARD_INPUT)) {
-        bytes = in.readNBytes(MOST_BYTES + 1);
+        bytes = in.readNBytes(ENOUGH);
       } else {
         Path path = Path.of(name);
         if (Files.isDirectory(path)) {
           return refuse(name, "is-directory", "this is a directory, not a network file", findings);
         }
         try (InputStream file = Files.newInputStream(path)) {
-          bytes = file.readNBytes(MOST_BYTES + 1);
+          bytes = file.readNBytes(ENOUGH);
         }
       }
-      return bytes.length <= MOST_BYTES
-          ? Optional.of(bytes)
-          : refuse(
-              name, "too-large", "this is larger than 16 MiB, the most that is read", findings);
+      return Optional.of(bytes);
     } catch (NoSuchFileException | InvalidPathException missing) {
       return refuse(name, "no-such-file", "there is no such file", findings);
     } catch (AccessDeniedException denied) {

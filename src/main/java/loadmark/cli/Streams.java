@@ -55,7 +55,7 @@ final class Streams {
             ? findings
             : findings.stream().filter(f -> f.severity() == Severity.ERROR).toList();
     if (!told.isEmpty()) {
-      message(FindingPrinter.print(told));
+      message(new FindingPrinter(false).print(told));
     }
   }
 }

@@ -2,7 +2,6 @@ package loadmark.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import loadmark.quantity.Engineering;
 import loadmark.response.Change;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
@@ -63,25 +62,25 @@ public final class CurveText {
         switch (z.state()) {
           case OPEN -> "open";
           case UNDETERMINED -> "undetermined";
-          case FINITE -> Engineering.format(z.magnitude(), "Ω", Unit.DIGITS);
+          case FINITE -> Unit.OHM.write(z.magnitude());
         });
     row.add(finite && !z.isZero() ? Impedances.phase(z) : NOTHING);
-    row.add(finite ? Engineering.format(z.re(), "Ω", Unit.DIGITS) : NOTHING);
-    row.add(finite ? Engineering.format(z.im(), "Ω", Unit.DIGITS) : NOTHING);
-    row.add(orNothing(CurveColumn.parallelOhm(z), "Ω"));
-    row.add(orNothing(CurveColumn.parallelFarad(point), "F"));
+    row.add(finite ? Unit.OHM.write(z.re()) : NOTHING);
+    row.add(finite ? Unit.OHM.write(z.im()) : NOTHING);
+    row.add(orNothing(CurveColumn.parallelOhm(z), Unit.OHM));
+    row.add(orNothing(CurveColumn.parallelFarad(point), Unit.FARAD));
     return row;
   }
 
-  private static String orNothing(double value, String unit) {
-    return Double.isFinite(value) ? Engineering.format(value, unit, Unit.DIGITS) : NOTHING;
+  private static String orNothing(double value, Unit unit) {
+    return Double.isFinite(value) ? unit.write(value) : NOTHING;
   }
 
   private static String change(Change change) {
     return switch (change.state()) {
       case UNDETERMINED -> NOTHING;
       case UNBOUNDED -> Values.UNBOUNDED;
-      case FINITE -> Unit.RATIO.write(change.magnitude(), Unit.DIGITS);
+      case FINITE -> Unit.RATIO.write(change.magnitude());
     };
   }
 }

@@ -15,49 +15,42 @@ final class Impedances {
 
   private Impedances() {}
 
-  /** {@code 12.34 kΩ ∠ −45.21°}. */
+  /** {@code 12.34 kΩ ∠ -45.21°}. */
   static String polar(Ohms z) {
     return switch (z.state()) {
       case OPEN -> "open";
       case UNDETERMINED -> "undetermined";
-      case FINITE ->
-          z.isZero()
-              ? "0 Ω"
-              : Engineering.format(z.magnitude(), "Ω", Unit.DIGITS) + " ∠ " + phase(z);
+      case FINITE -> z.isZero() ? "0 Ω" : Unit.OHM.write(z.magnitude()) + " ∠ " + phase(z);
     };
   }
 
-  /** {@code 8.694 kΩ − j8.757 kΩ}; empty where there is nothing to add. */
+  /** {@code 8.694 kΩ - j8.757 kΩ}; empty where there is nothing to add. */
   static String rectangular(Ohms z) {
     if (!z.isFinite() || z.isZero()) {
       return "";
     }
-    return Engineering.format(z.re(), "Ω", Unit.DIGITS)
-        + (z.im() < 0 ? " − j" : " + j")
-        + Engineering.format(Math.abs(z.im()), "Ω", Unit.DIGITS);
+    String sign = z.im() < 0 ? " - j" : " + j";
+    return Unit.OHM.write(z.re()) + sign + Unit.OHM.write(Math.abs(z.im()));
   }
 
   /** Four significant digits, at most four decimals. */
   static String phase(Ohms z) {
-    BigDecimal degrees = Unit.rounded(Unit.decimal(z.phaseDegrees()), Unit.DIGITS);
-    if (degrees.scale() > PHASE_DECIMALS) {
-      degrees = degrees.setScale(PHASE_DECIMALS, RoundingMode.HALF_EVEN);
-    }
-    if (degrees.signum() == 0) {
-      return "0°";
-    }
-    int missing = Unit.DIGITS - degrees.precision();
-    int scale = Math.max(0, Math.min(PHASE_DECIMALS, degrees.scale() + missing));
-    return degrees.setScale(scale, RoundingMode.HALF_EVEN).toPlainString().replace('-', '−') + "°";
+    BigDecimal exact = Unit.decimal(z.phaseDegrees());
+    BigDecimal degrees = Unit.rounded(exact, Engineering.DEFAULT_DIGITS);
+    int integerDigits = degrees.precision() - degrees.scale();
+    int decimals =
+        Math.max(0, Math.min(PHASE_DECIMALS, Engineering.DEFAULT_DIGITS - integerDigits));
+    BigDecimal shown = degrees.setScale(decimals, RoundingMode.HALF_EVEN);
+    return shown.signum() == 0 ? "0°" : shown.toPlainString() + "°";
   }
 
   /** {@code 31.62 kHz}, {@code DC}. */
   static String frequency(double hz) {
-    return frequency(hz, Unit.DIGITS);
+    return frequency(hz, Engineering.DEFAULT_DIGITS);
   }
 
   private static String frequency(double hz, int digits) {
-    return hz == 0 ? "DC" : Engineering.formatShort(hz, "Hz", digits);
+    return hz == 0 ? "DC" : Unit.HERTZ.writeShort(hz, digits);
   }
 
   /** {@code 10 Hz to 1 MHz}, with the digits that tell its ends apart. */
@@ -65,7 +58,7 @@ final class Impedances {
     if (band.isPoint()) {
       return frequency(band.fromHz());
     }
-    int digits = Unit.DIGITS;
+    int digits = Engineering.DEFAULT_DIGITS;
     while (digits < MOST_DIGITS
         && frequency(band.fromHz(), digits).equals(frequency(band.toHz(), digits))) {
       digits++;

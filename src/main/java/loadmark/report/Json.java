@@ -55,7 +55,8 @@ final class Json {
 
   static void writeFindings(JsonGenerator json, List<Finding> findings) throws IOException {
     json.writeArrayFieldStart("diagnostics");
-    for (Finding finding : findings.subList(0, Math.min(FindingPrinter.MOST, findings.size()))) {
+    for (Finding finding :
+        findings.subList(0, Math.min(FindingPrinter.MOST_SHOWN, findings.size()))) {
       json.writeStartObject();
       json.writeStringField("severity", finding.severity().word());
       json.writeStringField("code", finding.code());
@@ -69,8 +70,8 @@ final class Json {
       json.writeEndObject();
     }
     json.writeEndArray();
-    if (findings.size() > FindingPrinter.MOST) {
-      json.writeNumberField("more_diagnostics", findings.size() - FindingPrinter.MOST);
+    if (findings.size() > FindingPrinter.MOST_SHOWN) {
+      json.writeNumberField("more_diagnostics", findings.size() - FindingPrinter.MOST_SHOWN);
     }
   }
 

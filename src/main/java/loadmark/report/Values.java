@@ -7,6 +7,7 @@ import java.util.OptionalDouble;
 import loadmark.judge.Worst;
 import loadmark.network.Bound;
 import loadmark.network.Limit;
+import loadmark.quantity.Engineering;
 
 /** A limit's bound and values, for people. */
 final class Values {
@@ -44,13 +45,13 @@ final class Values {
   /** The fewest digits, four or more, with which a value stands on its own side of its bounds. */
   static int digits(double value, OptionalDouble atLeast, OptionalDouble atMost) {
     BigDecimal exact = Unit.decimal(value);
-    for (int digits = Unit.DIGITS; digits < MOST_DIGITS; digits++) {
+    for (int digits = Engineering.DEFAULT_DIGITS; digits < MOST_DIGITS; digits++) {
       BigDecimal shown = Unit.rounded(exact, digits);
       if (agree(value, shown, atMost, 1) && agree(value, shown, atLeast, -1)) {
         return digits;
       }
     }
-    return Math.max(Unit.DIGITS, exact.stripTrailingZeros().precision());
+    return Math.max(Engineering.DEFAULT_DIGITS, exact.stripTrailingZeros().precision());
   }
 
   private static boolean agree(
@@ -78,16 +79,18 @@ final class Values {
     Bound bound = limit.bound();
     Unit unit = Unit.of(limit);
     if (bound.atLeast().isPresent() && bound.atMost().isPresent()) {
-      return unit.writeBound(bound.atLeast().getAsDouble())
+      return unit.writeShort(bound.atLeast().getAsDouble(), Unit.MOST_BOUND_DIGITS)
           + " to "
-          + unit.writeBound(bound.atMost().getAsDouble());
+          + unit.writeShort(bound.atMost().getAsDouble(), Unit.MOST_BOUND_DIGITS);
     }
     if (bound.atLeast().isPresent()) {
-      return atLeast + unit.writeBound(bound.atLeast().getAsDouble());
+      return atLeast + unit.writeShort(bound.atLeast().getAsDouble(), Unit.MOST_BOUND_DIGITS);
     }
     List<String> either = new ArrayList<>();
-    bound.atMost().ifPresent(most -> either.add(unit.writeBound(most)));
-    bound.atMostOhm().ifPresent(most -> either.add(Unit.OHM.writeBound(most)));
+    bound.atMost().ifPresent(most -> either.add(unit.writeShort(most, Unit.MOST_BOUND_DIGITS)));
+    bound
+        .atMostOhm()
+        .ifPresent(most -> either.add(Unit.OHM.writeShort(most, Unit.MOST_BOUND_DIGITS)));
     return atMost + String.join(" or ", either);
   }
 }

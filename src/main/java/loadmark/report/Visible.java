@@ -1,44 +1,17 @@
 package loadmark.report;
 
-import java.util.Locale;
+import loadmark.diagnostic.Printable;
 
 /** Text that others wrote, made safe to show, and measured in columns. */
 final class Visible {
   private static final String CUT = "…";
+  private static final char PICTURE_OF_TAB = '\u2409';
 
   private Visible() {}
 
-  /** Control, format and separator characters become escapes; nothing else changes. */
+  /** With a sign in place of everything that could steer a terminal. */
   static String of(String text) {
-    if (text.codePoints().noneMatch(Visible::isHidden)) {
-      return text;
-    }
-    StringBuilder shown = new StringBuilder();
-    text.codePoints()
-        .forEach(
-            c -> {
-              if (isHidden(c)) {
-                String hex = Integer.toHexString(c).toUpperCase(Locale.ROOT);
-                shown.append("\\u{").append(hex).append('}');
-              } else {
-                shown.appendCodePoint(c);
-              }
-            });
-    return shown.toString();
-  }
-
-  private static boolean isHidden(int c) {
-    return switch (Character.getType(c)) {
-      case Character.CONTROL,
-          Character.FORMAT,
-          Character.LINE_SEPARATOR,
-          Character.PARAGRAPH_SEPARATOR,
-          Character.SURROGATE,
-          Character.PRIVATE_USE,
-          Character.UNASSIGNED ->
-          true;
-      default -> false;
-    };
+    return Printable.of(text).replace('\t', PICTURE_OF_TAB);
   }
 
   /** Columns that a terminal gives it: two for wide East Asian characters, none for marks. */

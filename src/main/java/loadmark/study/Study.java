@@ -5,7 +5,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.ConcurrentHashMap;
 import java.util.stream.Stream;
 import loadmark.binding.Binder;
 import loadmark.binding.Overrides;
@@ -13,7 +12,6 @@ import loadmark.binding.Purpose;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.SourceText;
 import loadmark.judge.Judge;
-import loadmark.judge.NetworkJudgement;
 import loadmark.network.Case;
 import loadmark.network.Network;
 import loadmark.network.Port;
@@ -95,13 +93,10 @@ public final class Study {
       return new FileResult.Invalid(
           source.text().name(), Optional.of(source.sha256()), findings.sorted());
     }
-    return new FileResult.Judged(source, judge(network.get()), findings.sorted());
-  }
-
-  private static NetworkJudgement judge(Network network) {
-    Map<Port, PortResponse> responses = new ConcurrentHashMap<>();
-    return Judge.judge(
-        network, port -> responses.computeIfAbsent(port, p -> Responses.of(network, p)));
+    return new FileResult.Judged(
+        source,
+        Judge.judge(network.get(), port -> Responses.of(network.get(), port)),
+        findings.sorted());
   }
 
   private Network select(Network network, SourceText source, Findings findings) {
