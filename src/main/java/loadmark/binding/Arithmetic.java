@@ -63,7 +63,7 @@ final class Arithmetic {
           call.name().span(),
           "there is no function `" + name + "`",
           Nearest.find(name, FUNCTIONS)
-              .map(near -> "did you mean " + near + "?")
+              .map(near -> "did you mean `" + near + "`?")
               .orElse("there are sqrt, ln, log10, exp, abs, min and max"));
       return Optional.empty();
     }

@@ -84,6 +84,7 @@ public final class Binder {
     List<Supply> supplies = readSupplies();
     Map<String, Port> ports = readPorts();
     Map<String, Load> loads = readLoads();
+    new UnknownNodes(statements, declared).report(findings);
     checkTopology(wiring, parts, supplies, ports, loads);
 
     Map<String, Case> cases = new Cases(declared, loads, findings).read(statements);
@@ -94,12 +95,10 @@ public final class Binder {
     int before = findings.errorCount();
     Optional<Sweep> sweep = effective.flatMap(sweeps::read);
     boolean sweepUnread = findings.errorCount() > before || declared.isBroken("sweep");
-    List<Limit> limits = List.of();
-    if (!sweepUnread) {
-      Scopes scopes = new Scopes(values, sweeps, sweep, overriding, findings);
-      Criteria criteria = new Criteria(values, impedances, findings);
-      limits = new Limits(declared, criteria, scopes, cases, ports, findings).read(statements);
-    }
+    Scopes scopes = new Scopes(values, sweeps, sweep, sweepUnread, overriding, findings);
+    Criteria criteria = new Criteria(values, impedances, findings);
+    List<Limit> limits =
+        new Limits(declared, criteria, scopes, cases, ports, findings).read(statements);
     checkEnough(file, purpose, overriding, ports, limits);
     return findings.hasErrors()
         ? Optional.empty()

@@ -22,6 +22,7 @@ final class Cases {
   private final Findings findings;
   private final Map<String, Case> byName = new LinkedHashMap<>();
   private final Map<String, Name> lines = new HashMap<>();
+  private boolean incomplete;
 
   /**
    * @param loads the loads that were bound, by name, in the order declared
@@ -49,7 +50,7 @@ final class Cases {
         List<Load> all = List.copyOf(loads.values());
         byName.put(Case.ALL, new Case(Case.ALL, all, List.of(), 0));
       }
-    } else if (!declared.isBroken("case")) {
+    } else if (!declared.isBroken("case") && !incomplete) {
       warnOfUnjudged();
     }
     return byName;
@@ -100,6 +101,7 @@ final class Cases {
     Set<String> seen = new LinkedHashSet<>();
     for (Name name : names) {
       Load load = loads.get(name.text());
+      incomplete |= load == null;
       if (load == null && !declared.isDoubtful(name.text())) {
         if (!declared.loads().containsKey(name.text())) {
           findings.error(
@@ -107,7 +109,7 @@ final class Cases {
               name.span(),
               "there is no load `" + name.text() + "`",
               Nearest.find(name.text(), declared.loads().keySet())
-                  .map(near -> "did you mean " + near + "?")
+                  .map(near -> "did you mean `" + near + "`?")
                   .orElse("declare it on a line of its own: load " + name.text() + " shunt …"));
         }
       } else if (!seen.add(name.text())) {

@@ -144,7 +144,7 @@ final class Limits {
           name.span(),
           "there is no case `" + name.text() + "`",
           Nearest.find(name.text(), cases.keySet())
-              .map(near -> "did you mean " + near + "?")
+              .map(near -> "did you mean `" + near + "`?")
               .orElse("the cases are " + String.join(", ", cases.keySet())));
     }
     return Optional.ofNullable(one);
@@ -161,7 +161,7 @@ final class Limits {
               name.span(),
               "there is no port `" + name.text() + "`",
               Nearest.find(name.text(), ports.keySet())
-                  .map(near -> "did you mean " + near + "?")
+                  .map(near -> "did you mean `" + near + "`?")
                   .orElse("the ports are " + String.join(", ", ports.keySet())));
         }
         return port == null ? List.of() : List.of(port);

@@ -18,18 +18,26 @@ final class Scopes {
   private final Values values;
   private final Sweeps sweeps;
   private final Optional<Sweep> sweep;
+  private final boolean sweepUnread;
   private final boolean overriding;
   private final Findings findings;
 
   /**
    * @param sweep empty where the file has none; a limit then names its own frequencies
+   * @param sweepUnread whether there is one that could not be read: nothing is then held against it
    * @param overriding whether the sweep is the command line's: limits outside are then skipped
    */
   Scopes(
-      Values values, Sweeps sweeps, Optional<Sweep> sweep, boolean overriding, Findings findings) {
+      Values values,
+      Sweeps sweeps,
+      Optional<Sweep> sweep,
+      boolean sweepUnread,
+      boolean overriding,
+      Findings findings) {
     this.values = values;
     this.sweeps = sweeps;
     this.sweep = sweep;
+    this.sweepUnread = sweepUnread;
     this.overriding = overriding;
     this.findings = findings;
   }
@@ -71,6 +79,9 @@ final class Scopes {
   }
 
   private Optional<List<Band>> wholeSweep(Statement.Limit limit) {
+    if (sweepUnread) {
+      return Optional.empty();
+    }
     if (sweep.isEmpty()) {
       findings.error(
           "no-sweep",

@@ -3,6 +3,7 @@ package loadmark.binding;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import loadmark.diagnostic.Finding;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.Nearest;
@@ -15,9 +16,10 @@ final class SingleConnectionCheck implements Check {
   @Override
   public void check(Draft draft, Findings findings) {
     Connections all = Connections.withPorts(draft);
+    Set<Node> free = ReachCheck.findFree(draft);
     for (Node node : draft.nodes().all()) {
       Optional<Part> only = all.findOnly(node).flatMap(Connections.Edge::part);
-      if (node.isGround() || only.isEmpty()) {
+      if (node.isGround() || only.isEmpty() || free.contains(node)) {
         continue;
       }
       List<String> others = new ArrayList<>();
@@ -36,7 +38,7 @@ final class SingleConnectionCheck implements Check {
                   + "` has a single connection: `"
                   + only.get().name()
                   + "` has no effect",
-              Nearest.find(node.name(), others).map(near -> "did you mean " + near + "?")));
+              Nearest.find(node.name(), others).map(near -> "did you mean `" + near + "`?")));
     }
   }
 }

@@ -61,7 +61,7 @@ final class Values {
                 value.span(),
                 "the file has no value `" + name + "`",
                 Nearest.find(name, lets.keySet())
-                    .map(near -> "did you mean " + near + "?")
+                    .map(near -> "did you mean `" + near + "`?")
                     .orElse("only a value that the file names with let can be set"));
           }
         });
@@ -273,7 +273,7 @@ final class Values {
           name.span(),
           "there is no value `" + name.text() + "`",
           Nearest.find(name.text(), lets.keySet())
-              .map(near -> "did you mean " + near + "?")
+              .map(near -> "did you mean `" + near + "`?")
               .orElse("name a value with a line of its own: let " + name.text() + " = …"));
       return Optional.empty();
     }

@@ -216,7 +216,7 @@ final class Wiring {
           "undeclared-part",
           item.span(),
           "there is no part `" + name + "`",
-          "did you mean " + near.get() + "?");
+          "did you mean `" + near.get() + "`?");
       return near;
     }
     findings.error(
@@ -224,7 +224,7 @@ final class Wiring {
         item.span(),
         "there is no part `" + name + "`",
         Nearest.find(name, declared.parts().keySet())
-            .map(other -> "did you mean " + other + "?")
+            .map(other -> "did you mean `" + other + "`?")
             .orElse("declare it on a line of its own, for example: resistor " + name + " = 10 kΩ"));
     doubtful = true;
     return Optional.empty();
