@@ -53,7 +53,8 @@ final class Peak {
 
   /** Whether {@code one} is as bad as {@code best}, rounding aside. */
   static boolean isTie(Sample one, Sample best) {
-    return one.excess() >= best.excess() - TIE * Math.max(1, Math.abs(best.excess()));
+    return one.excess() == best.excess()
+        || one.excess() >= best.excess() - TIE * Math.max(1, Math.abs(best.excess()));
   }
 
   private static boolean isMaximum(List<Sample> samples, int i) {
