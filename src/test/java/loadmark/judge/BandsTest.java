@@ -240,6 +240,20 @@ class BandsTest {
   }
 
   @Test
+  void bandEndsWhereNothingIsKnownAndGoesOnAcrossASingleUnknownPoint() {
+    Comparison edge =
+        Formula.alone(hz -> hz > 1000 && hz < 2000 ? Ohms.UNDETERMINED : Ohms.of(1000 / hz, 0));
+    BrokenBand band = judge(edge, below(0.9, WIDE)).bands().get(0);
+    assertThat(band.band().fromHz()).isEqualTo(10);
+    assertNear(band.band().toHz(), 1000);
+    Comparison hole = Formula.alone(hz -> hz == 10_000 ? Ohms.UNDETERMINED : Ohms.of(1, 0));
+    Limit limit = below(0.9, new Band(1000, 100_000));
+    LimitJudgement across = judge(hole, limit);
+    assertThat(across.undetermined()).endsWith("at 10000 Hz");
+    assertThat(across.bands()).extracting(BrokenBand::band).containsExactly(limit.scope().get(0));
+  }
+
+  @Test
   void nothingDeterminedHasNoWorstPoint() {
     LimitJudgement result = judge(Formula.alone(hz -> Ohms.UNDETERMINED), below(5, WIDE));
     assertThat(result.verdict()).isEqualTo(Verdict.UNDETERMINED);

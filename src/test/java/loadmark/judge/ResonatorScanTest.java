@@ -107,12 +107,21 @@ class ResonatorScanTest {
   private static Limit limit(Random random, Comparison comparison) {
     double hz = between(random, BAND.fromHz(), BAND.toHz());
     double size = comparison.at(hz).with().magnitude();
-    return switch (random.nextInt(5)) {
+    return switch (random.nextInt(9)) {
       case 0 -> Formula.limit(Criterion.MAGNITUDE, Bound.atMost(1.2 * size), BAND);
       case 1 -> Formula.limit(Criterion.MAGNITUDE, Bound.between(0.9 * size, 2 * size), BAND);
       case 2 -> Formula.limit(Criterion.PHASE, Bound.between(-60, 40 * random.nextDouble()), BAND);
       case 3 ->
           Formula.limit(Criterion.RETURN_LOSS, Bound.atLeast(10), Formula.resistor(2 * size), BAND);
+      case 4 ->
+          Formula.limit(Criterion.MAGNITUDE_CHANGE, Bound.atMost(between(random, 1e-6, 0.1)), BAND);
+      case 5 -> Formula.limit(Criterion.PHASE_CHANGE, Bound.atMost(between(random, 1e-4, 9)), BAND);
+      case 6 -> Formula.limit(Criterion.PARALLEL_RESISTANCE, Bound.atLeast(1.5 * size), BAND);
+      case 7 ->
+          Formula.limit(
+              Criterion.PARALLEL_CAPACITANCE,
+              Bound.between(-1 / (Formula.omega(hz) * size), 0.5 / (Formula.omega(hz) * size)),
+              BAND);
       default -> Formula.limit(Criterion.CHANGE, Bound.atMost(between(random, 1e-6, 0.1)), BAND);
     };
   }
