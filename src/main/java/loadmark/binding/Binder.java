@@ -26,6 +26,9 @@ public final class Binder {
 
   public static Optional<Network> bind(
       NetworkFile file, Overrides overrides, Purpose purpose, Findings findings) {
+    if (file.statements().isEmpty()) {
+      findings.error("nothing-written", file.source().whole(), "this file says nothing");
+    }
     if (findings.hasErrors()) {
       return Optional.empty();
     }

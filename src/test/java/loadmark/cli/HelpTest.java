@@ -50,6 +50,7 @@ class HelpTest {
   void versionIsThatOfTheBuild() throws IOException {
     assertThat(run("--version")).isEqualTo("loadmark " + Version.CURRENT + "\n");
     assertThat(Files.readString(Path.of("pom.xml")))
-        .contains("<artifactId>loadmark</artifactId>\n  <version>" + Version.CURRENT + "</version>");
+        .contains(
+            "<artifactId>loadmark</artifactId>\n  <version>" + Version.CURRENT + "</version>");
   }
 }

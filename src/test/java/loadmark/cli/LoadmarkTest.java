@@ -181,7 +181,8 @@ class LoadmarkTest {
   void curveHasTheBareNetworkFirst() {
     Run run = runWith(BROKEN, "curve", "--at", "1 kHz, 2 kHz", "--format", "csv", "-");
     assertThat(run.err()).isEmpty();
-    assertThat(run.out().lines().map(l -> l.split(",", -1)).map(c -> c[1] + " " + c[2] + " " + c[3]))
+    assertThat(
+            run.out().lines().map(l -> l.split(",", -1)).map(c -> c[1] + " " + c[2] + " " + c[3]))
         .containsExactly(
             "case hz re_ohm",
             "bare 1000.0 100.0",

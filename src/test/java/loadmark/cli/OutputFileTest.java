@@ -1,7 +1,6 @@
 package loadmark.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
-
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import java.io.IOException;

@@ -38,8 +38,16 @@ class CheckJsonTest {
     assertThat(file.fieldNames())
         .toIterable()
         .containsExactly(
-            "file", "sha256", "uses", "options", "network", "verdict", "sweep", "cases",
-            "cautions", "diagnostics");
+            "file",
+            "sha256",
+            "uses",
+            "options",
+            "network",
+            "verdict",
+            "sweep",
+            "cases",
+            "cautions",
+            "diagnostics");
     assertThat(file.path("options").path(0).asText()).isEqualTo("--sweep 10 Hz to 1 MHz");
     JsonNode all = file.path("cases").path(2);
     assertThat(all.fieldNames())
@@ -51,8 +59,16 @@ class CheckJsonTest {
     assertThat(all.path("limits").path(0).fieldNames())
         .toIterable()
         .containsExactly(
-            "limit", "line", "bound", "from_hz", "to_hz", "verdict", "bare_verdict", "method",
-            "worst", "bands");
+            "limit",
+            "line",
+            "bound",
+            "from_hz",
+            "to_hz",
+            "verdict",
+            "bare_verdict",
+            "method",
+            "worst",
+            "bands");
     assertThat(all.path("limits").path(0).path("bare_verdict").isNull()).isTrue();
     assertThat(all.path("limits").path(1).path("bare_verdict").asText()).isEqualTo("broken");
   }
@@ -93,8 +109,7 @@ class CheckJsonTest {
   @Test
   void openUndeterminedAndUnboundedHaveTheirOwnForms() throws Exception {
     Worst worst =
-        new Worst(
-            0, OptionalDouble.empty(), OptionalDouble.empty(), Ohms.UNDETERMINED, Ohms.OPEN);
+        new Worst(0, OptionalDouble.empty(), OptionalDouble.empty(), Ohms.UNDETERMINED, Ohms.OPEN);
     Limit limit = Samples.limit(Criterion.CHANGE, Bound.atMost(0.02), 3, "");
     JsonNode json = limit(Samples.broken(limit, worst, new BrokenBand(Band.DC, worst)));
     assertThat(json.path("worst").toString())
@@ -109,12 +124,7 @@ class CheckJsonTest {
   @Test
   void limitInOhmGivesItsValueInOhm() throws Exception {
     Worst worst =
-        new Worst(
-            1e3,
-            OptionalDouble.of(0.04),
-            OptionalDouble.of(7),
-            Samples.BARE,
-            Samples.LOADED);
+        new Worst(1e3, OptionalDouble.of(0.04), OptionalDouble.of(7), Samples.BARE, Samples.LOADED);
     JsonNode alone =
         limit(Samples.kept(Samples.limit(Criterion.CHANGE, Bound.atMostOhm(8), 3, ""), worst));
     assertThat(alone.path("bound").toString()).isEqualTo("{\"at_most_ohm\":8.0}");
@@ -149,12 +159,10 @@ class CheckJsonTest {
     Limit limit = Samples.limit(Criterion.RETURN_LOSS, Bound.atLeast(20), 3, "");
     OnePort fifty = OnePort.of(ElementKind.RESISTANCE, 50);
     JsonNode plain =
-        limit(
-            Samples.kept(Samples.withReference(limit, fifty, "50 Ω"), Samples.worst(1, 30)));
+        limit(Samples.kept(Samples.withReference(limit, fifty, "50 Ω"), Samples.worst(1, 30)));
     assertThat(plain.path("reference_ohm").asDouble()).isEqualTo(50);
     assertThat(plain.has("reference")).isFalse();
-    OnePort network =
-        OnePort.parallel(List.of(fifty, OnePort.of(ElementKind.INDUCTANCE, 50e-6)));
+    OnePort network = OnePort.parallel(List.of(fifty, OnePort.of(ElementKind.INDUCTANCE, 50e-6)));
     JsonNode text =
         limit(
             Samples.kept(

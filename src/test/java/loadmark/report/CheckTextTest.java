@@ -162,12 +162,7 @@ class CheckTextTest {
   void valueWithoutBoundSaysSo() {
     Limit limit = Samples.limit(Criterion.CHANGE, Bound.atMost(0.02), 3, "limit change 2 %");
     Worst unbounded =
-        new Worst(
-            0,
-            OptionalDouble.empty(),
-            OptionalDouble.empty(),
-            Ohms.of(0, 0),
-            Ohms.OPEN);
+        new Worst(0, OptionalDouble.empty(), OptionalDouble.empty(), Ohms.of(0, 0), Ohms.OPEN);
     Case one = new Case("probe", List.of(Samples.load("probe", 2)), List.of(), 0);
     String text =
         CheckText.write(

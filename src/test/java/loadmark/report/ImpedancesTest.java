@@ -32,8 +32,7 @@ class ImpedancesTest {
   @Test
   void bandEndsAreToldApart() {
     assertThat(Impedances.band(new Band(10, 1e6))).isEqualTo("10 Hz to 1 MHz");
-    assertThat(Impedances.band(new Band(31620.1, 31620.4)))
-        .isEqualTo("31.6201 kHz to 31.6204 kHz");
+    assertThat(Impedances.band(new Band(31620.1, 31620.4))).isEqualTo("31.6201 kHz to 31.6204 kHz");
     assertThat(Impedances.band(Band.at(5000))).isEqualTo("5 kHz");
     assertThat(Impedances.band(Band.DC)).isEqualTo("DC");
   }
