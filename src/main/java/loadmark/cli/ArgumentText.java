@@ -44,6 +44,11 @@ final class ArgumentText {
     return whole();
   }
 
+  /** Whether an argument sets {@code option} with {@code =}. */
+  boolean sets(String option) {
+    return arguments.stream().anyMatch(a -> a.startsWith(option + "="));
+  }
+
   Span whole() {
     return new Span(source, 1, 1, "loadmark".length());
   }

@@ -34,13 +34,23 @@ final class Slips {
       String name = name(missing.getMissing().get(0));
       findings.error("option-without-value", text.place(name), name + " needs a value");
     } else {
-      String name = slip.getArgSpec() == null ? "" : name(slip.getArgSpec());
-      findings.error(
-          "unclear-option",
-          name.isEmpty() ? text.whole() : text.place(name),
-          name.isEmpty() ? "the arguments cannot be read" : name + " cannot be read as it stands",
-          help(command));
+      addFlagWithValue(command);
     }
+  }
+
+  /** What is left of the ways to go wrong: a flag that is given a value. */
+  private void addFlagWithValue(CommandSpec command) {
+    Optional<String> flag =
+        command.options().stream()
+            .filter(o -> o.arity().max() == 0)
+            .map(OptionSpec::longestName)
+            .filter(text::sets)
+            .findFirst();
+    findings.error(
+        "unclear-option",
+        flag.map(text::place).orElse(text.whole()),
+        flag.map(f -> f + " takes no value").orElse("these arguments cannot be read"),
+        help(command));
   }
 
   private void addUnmatched(List<String> unmatched, CommandSpec command) {

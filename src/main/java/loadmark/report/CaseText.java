@@ -146,7 +146,7 @@ final class CaseText {
       return;
     }
     page.blank();
-    page.paragraph("with one load taken off:");
+    page.row("  with one load taken off");
     Limit limit =
         one.limits().stream()
             .filter(l -> l.verdict() == Verdict.BROKEN)
@@ -160,7 +160,7 @@ final class CaseText {
               .worst()
               .map(w -> limit.criterion().words() + " " + Values.worst(limit, w) + place(w.hz()))
               .orElse("");
-      columns.add("without " + Visible.of(blame.withoutLoad().name()), worst);
+      columns.add("  without " + Visible.of(blame.withoutLoad().name()), worst);
     }
     List<String> lines = columns.lines(page.room());
     for (int i = 0; i < lines.size(); i++) {

@@ -12,6 +12,7 @@ import org.jspecify.annotations.Nullable;
  */
 final class Page {
   static final int WIDTH = 100;
+  private static final String INDENT = "  ";
   private static final int LABEL = 10;
 
   private final StringBuilder text = new StringBuilder();
@@ -59,7 +60,7 @@ final class Page {
     gutter(null).append(row.stripTrailing()).append('\n');
   }
 
-  /** A label, and text that hangs beside it. */
+  /** A label below a heading, and text that hangs beside it. */
   void labelled(String label, String rest) {
     labelled(null, label, rest);
   }
@@ -67,8 +68,8 @@ final class Page {
   void labelled(@Nullable Outcome outcome, String label, String rest) {
     int column = Math.max(LABEL, label.length() + 2);
     boolean first = true;
-    for (String line : wrap(rest, room() - column)) {
-      String left = Visible.pad(first ? label : "", column);
+    for (String line : wrap(rest, room() - INDENT.length() - column)) {
+      String left = INDENT + Visible.pad(first ? label : "", column);
       gutter(first ? outcome : null).append((left + line).stripTrailing()).append('\n');
       first = false;
     }
