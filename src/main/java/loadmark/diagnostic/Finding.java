@@ -13,9 +13,10 @@ import java.util.Optional;
 public record Finding(
     Severity severity, String code, Span place, String message, Optional<String> hint) {
 
-  /** By line, then column, then in the order found. */
+  /** By the file's name, then line, then column, then in the order found. */
   public static final Comparator<Finding> BY_PLACE =
-      Comparator.<Finding>comparingInt(f -> f.place().line())
+      Comparator.<Finding, String>comparing(f -> f.place().source().name())
+          .thenComparingInt(f -> f.place().line())
           .thenComparingInt(f -> f.place().column());
 
   public boolean isError() {

@@ -1,0 +1,127 @@
+package loadmark.cli;
+
+import java.util.List;
+import java.util.Optional;
+import loadmark.cli.Invocation.Manner;
+import loadmark.diagnostic.Findings;
+import loadmark.diagnostic.Nearest;
+import loadmark.study.Request;
+import picocli.CommandLine;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.ParseResult;
+
+/** Arguments to what they ask for; slips become findings in our own words. */
+final class Arguments {
+  private static final String STANDARD_INPUT = "-";
+
+  private final ArgumentText text;
+  private final Findings findings;
+
+  private Arguments(ArgumentText text, Findings findings) {
+    this.text = text;
+    this.findings = findings;
+  }
+
+  /** What is asked for; empty, with findings, where it makes no sense. */
+  static Optional<Invocation> parse(String[] arguments, Findings findings) {
+    ArgumentText text = new ArgumentText(arguments);
+    CommandLine commands = Options.commandLine();
+    try {
+      return new Arguments(text, findings).read(commands.parseArgs(arguments));
+    } catch (ParameterException slip) {
+      new Slips(text, findings).add(slip);
+      return Optional.empty();
+    }
+  }
+
+  /**
+   * Whether the results are asked for as JSON. Told without parsing, so that a slip is told as JSON
+   * too.
+   */
+  static boolean wantJson(String[] arguments) {
+    List<String> all = List.of(arguments);
+    int format = all.lastIndexOf(Options.FORMAT);
+    boolean apart = format >= 0 && format + 1 < all.size() && all.get(format + 1).equals("json");
+    return apart || all.contains(Options.FORMAT + "=json");
+  }
+
+  private Optional<Invocation> read(ParseResult root) {
+    ParseResult command = root.hasSubcommand() ? root.subcommand() : root;
+    String name = command.commandSpec().name();
+    if (command.isUsageHelpRequested()) {
+      return Optional.of(new Invocation.Help(name));
+    }
+    if (command.isVersionHelpRequested()) {
+      return Optional.of(new Invocation.ShowVersion());
+    }
+    if (command == root) {
+      findings.error(
+          "no-command", text.whole(), "a command is missing", "loadmark check FILE judges a file");
+      return Optional.empty();
+    }
+    return read(name, command);
+  }
+
+  private Optional<Invocation> read(String name, ParseResult command) {
+    List<String> files = command.matchedPositionalValue(0, List.of());
+    checkFiles(name, files);
+    Manner manner =
+        new Manner(
+            format(find(command, Options.FORMAT)),
+            find(command, Options.OUTPUT),
+            command.hasMatchedOption(Options.QUIET),
+            command.hasMatchedOption(Options.NO_COLOR));
+    Request request =
+        new Request(
+            find(command, Options.SWEEP),
+            name.equals(Options.CURVE) ? find(command, Options.AT) : Optional.empty(),
+            command.matchedOptionValue(Options.SET, List.of()),
+            find(command, Options.PORT),
+            find(command, Options.CASE));
+    if (findings.hasErrors()) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        name.equals(Options.CHECK)
+            ? new Invocation.Check(files, request, manner)
+            : new Invocation.Curve(files.get(0), request, manner));
+  }
+
+  private static Optional<String> find(ParseResult command, String option) {
+    return Optional.ofNullable(command.<String>matchedOptionValue(option, null));
+  }
+
+  private void checkFiles(String command, List<String> files) {
+    if (files.isEmpty()) {
+      findings.error(
+          "no-file",
+          text.place(command),
+          command + " needs a FILE",
+          "a network file, or - for standard input");
+    } else if (command.equals(Options.CURVE) && files.size() > 1) {
+      findings.error("too-many-files", text.place(files.get(1)), "curve takes one FILE alone");
+    } else if (files.stream().filter(STANDARD_INPUT::equals).count() > 1) {
+      findings.error(
+          "stdin-twice", text.place(STANDARD_INPUT), "standard input can be read only once");
+    }
+  }
+
+  private Format format(Optional<String> word) {
+    if (word.isEmpty()) {
+      return Format.TEXT;
+    }
+    Optional<Format> format = Format.find(word.get());
+    if (format.isEmpty()) {
+      String hint =
+          Nearest.find(word.get(), Format.words())
+              .map(n -> "did you mean " + n + "?")
+              .orElse("--format takes " + String.join(", ", Format.words()));
+      findings.error(
+          "unknown-format",
+          text.place(Options.FORMAT),
+          "there is no format '" + word.get() + "'",
+          hint);
+    }
+    return format.orElse(Format.TEXT);
+  }
+}

@@ -1,0 +1,106 @@
+package loadmark.cli;
+
+import java.util.List;
+import java.util.Optional;
+import loadmark.diagnostic.Findings;
+import loadmark.diagnostic.Nearest;
+import picocli.CommandLine.MissingParameterException;
+import picocli.CommandLine.Model.ArgSpec;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
+import picocli.CommandLine.OverwrittenOptionException;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.UnmatchedArgumentException;
+
+/** What the argument parser could not take, in our words. */
+final class Slips {
+  private final ArgumentText text;
+  private final Findings findings;
+
+  Slips(ArgumentText text, Findings findings) {
+    this.text = text;
+    this.findings = findings;
+  }
+
+  void add(ParameterException slip) {
+    CommandSpec command = slip.getCommandLine().getCommandSpec();
+    if (slip instanceof UnmatchedArgumentException unmatched) {
+      addUnmatched(unmatched.getUnmatched(), command);
+    } else if (slip instanceof OverwrittenOptionException twice) {
+      String name = name(twice.getOverwritten());
+      findings.error("option-twice", text.place(name), name + " is given twice");
+    } else if (slip instanceof MissingParameterException missing
+        && !missing.getMissing().isEmpty()) {
+      String name = name(missing.getMissing().get(0));
+      findings.error("option-without-value", text.place(name), name + " needs a value");
+    } else {
+      String name = slip.getArgSpec() == null ? "" : name(slip.getArgSpec());
+      findings.error(
+          "unclear-option",
+          name.isEmpty() ? text.whole() : text.place(name),
+          name.isEmpty() ? "the arguments cannot be read" : name + " cannot be read as it stands",
+          help(command));
+    }
+  }
+
+  private void addUnmatched(List<String> unmatched, CommandSpec command) {
+    boolean root = command.parent() == null;
+    String first = unmatched.get(0);
+    if (root && !first.startsWith("-")) {
+      findings.error(
+          "unknown-command",
+          text.place(first),
+          "there is no command '" + first + "'",
+          Nearest.find(first, Options.COMMANDS)
+              .map(n -> "did you mean " + n + "?")
+              .orElse(help(command)));
+      return;
+    }
+    for (String argument : unmatched) {
+      if (argument.startsWith("-")) {
+        addOption(argument, command, root);
+      }
+      if (root) {
+        return;
+      }
+    }
+    if (!findings.hasErrors()) {
+      findings.error(
+          "unclear-argument",
+          text.place(first),
+          "'" + first + "' has no meaning here",
+          help(command));
+    }
+  }
+
+  private void addOption(String argument, CommandSpec command, boolean root) {
+    int equals = argument.indexOf('=');
+    String option = equals < 0 ? argument : argument.substring(0, equals);
+    List<String> known = command.options().stream().map(OptionSpec::longestName).toList();
+    Optional<String> elsewhere =
+        root ? Optional.of("options come after the command") : other(option);
+    String hint =
+        elsewhere
+            .or(() -> Nearest.find(option, known).map(n -> "did you mean " + n + "?"))
+            .orElse(help(command));
+    findings.error(
+        "unknown-option",
+        text.place(argument),
+        root
+            ? "there is no option " + option + " before a command"
+            : command.name() + " has no option " + option,
+        hint);
+  }
+
+  private static Optional<String> other(String option) {
+    return option.equals(Options.AT) ? Optional.of("--at belongs to curve") : Optional.empty();
+  }
+
+  private static String name(ArgSpec spec) {
+    return spec instanceof OptionSpec option ? option.longestName() : spec.paramLabel();
+  }
+
+  private static String help(CommandSpec command) {
+    return command.qualifiedName() + " --help lists what there is";
+  }
+}

@@ -1,0 +1,142 @@
+package loadmark.report;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import loadmark.judge.CaseJudgement;
+import loadmark.judge.LimitJudgement;
+import loadmark.judge.LimitJudgement.Method;
+import loadmark.judge.NetworkJudgement;
+import loadmark.judge.Worst;
+import loadmark.network.Limit;
+import loadmark.network.Load;
+import loadmark.network.Network;
+import loadmark.network.Sweep;
+import loadmark.study.FileResult;
+import loadmark.study.Outcome;
+
+/** One judged file: the verdict, all judgements at a glance, then each with what it rests on. */
+final class FileText {
+  private final FileResult.Judged file;
+  private final NetworkJudgement judgement;
+  private final Page page;
+
+  FileText(FileResult.Judged file, Style style) {
+    this.file = file;
+    this.judgement = file.judgement();
+    this.page = new Page(style, hasUndetermined());
+  }
+
+  private boolean hasUndetermined() {
+    return judgement.cases().stream()
+        .flatMap(c -> c.limits().stream())
+        .anyMatch(l -> Outcome.of(l.verdict()) == Outcome.UNDETERMINED);
+  }
+
+  String write() {
+    Network network = judgement.network();
+    page.heading(file.outcome(), Visible.of(file.file()));
+    if (!network.title().isEmpty()) {
+      page.paragraph(Visible.of(network.title()));
+    }
+    page.paragraph(
+        CheckText.tally(judgement) + network.sweep().map(s -> ", " + sweep(s)).orElse(""));
+    writeMethod();
+    long judgements = judgement.cases().stream().mapToLong(c -> c.limits().size()).sum();
+    if (judgements > 1) {
+      page.blank();
+      writeGlance();
+    }
+    for (CaseJudgement one : judgement.cases()) {
+      page.blank();
+      new CaseText(one, page).write();
+    }
+    writeNotAlone();
+    return page.toString();
+  }
+
+  private static String sweep(Sweep sweep) {
+    String band = sweep.band().map(b -> "over " + Impedances.band(b)).orElse("");
+    String dc = sweep.dc() ? "at DC" : "";
+    return dc.isEmpty() || band.isEmpty() ? dc + band : dc + " and " + band;
+  }
+
+  /** How far the judgements can be trusted not to have missed anything. */
+  private void writeMethod() {
+    List<Limit> sampled =
+        judgement.cases().stream()
+            .flatMap(c -> c.limits().stream())
+            .filter(l -> l.method() == Method.SAMPLED)
+            .map(LimitJudgement::limit)
+            .toList();
+    long all = judgement.cases().stream().mapToLong(c -> c.limits().size()).sum();
+    if (sampled.isEmpty()) {
+      page.paragraph("complete: every crossing was found, none can hide between frequencies");
+      return;
+    }
+    String which =
+        sampled.size() == all
+            ? "sampled"
+            : "sampled in line "
+                + sampled.stream()
+                    .map(Limit::line)
+                    .distinct()
+                    .sorted()
+                    .map(line -> Integer.toString(line))
+                    .collect(Collectors.joining(", "))
+                + ", else complete";
+    page.paragraph(which + ": a breach narrower than the grid of frequencies could be missed");
+  }
+
+  private void writeGlance() {
+    boolean ports = judgement.network().ports().size() > 1;
+    Columns columns = new Columns("llrllll");
+    columns.add(ports ? "port" : "", "case", "line", "limit", "worst", "at", "allowed");
+    for (CaseJudgement one : judgement.cases()) {
+      String port = ports ? Visible.of(one.port().name()) : "";
+      String name = Visible.of(one.judged().name());
+      for (LimitJudgement limit : one.limits()) {
+        addGlance(columns, port, name, limit);
+      }
+    }
+    int room = page.room() + (ports ? 0 : 2);
+    List<String> lines = columns.lines(room).stream().map(l -> ports ? l : l.substring(2)).toList();
+    page.row(lines.get(0));
+    int next = 1;
+    for (CaseJudgement one : judgement.cases()) {
+      for (LimitJudgement limit : one.limits()) {
+        page.row(Outcome.of(limit.verdict()), lines.get(next++));
+      }
+    }
+  }
+
+  private static void addGlance(Columns columns, String port, String name, LimitJudgement judged) {
+    Limit limit = judged.limit();
+    Optional<Worst> worst = judged.worst();
+    columns.add(
+        port,
+        name,
+        Integer.toString(limit.line()),
+        limit.criterion().words(),
+        worst.map(w -> Values.worst(limit, w)).orElse("–"),
+        worst.map(w -> Impedances.frequency(w.hz())).orElse("–"),
+        Values.shortBound(limit));
+  }
+
+  private void writeNotAlone() {
+    List<String> names =
+        judgement.network().loads().stream()
+            .filter(load -> !isJudgedAlone(load))
+            .map(load -> Visible.of(load.name()))
+            .toList();
+    if (!names.isEmpty()) {
+      page.blank();
+      page.paragraph("not judged alone: " + String.join(", ", names));
+    }
+  }
+
+  private boolean isJudgedAlone(Load load) {
+    return judgement.cases().stream()
+        .anyMatch(c -> c.judged().loads().equals(List.of(load)) && c.judged().against().isEmpty());
+  }
+}
