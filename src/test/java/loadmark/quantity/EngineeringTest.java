@@ -69,7 +69,7 @@ class EngineeringTest {
     assertThat(Engineering.exact(value)).isEqualTo(text);
   }
 
-  /** Double.toString before Java 19 writes 2.0E-3 as such but 2^-44 with a digit too many. */
+  /** Double.toString writes the smallest double as 4.9E-324; 5e-324 reads back the same. */
   @Test
   void exactIsNoLongerThanItMustBe() {
     assertThat(Engineering.exact(2.2250738585072014e-308)).isEqualTo("2.2250738585072014e-308");

@@ -19,8 +19,8 @@ import org.junit.jupiter.params.provider.CsvSource;
 /** Whatever comes in, no exception, and every finding stands inside the text. */
 class HostileInputTest {
   private static final long SEED = 20260102;
-  private static final int SAMPLE = 3_000;
-  private static final int THOROUGH = 300_000;
+  private static final int SAMPLE = 1_500;
+  private static final int THOROUGH = 50_000;
 
   private static final List<String> PIECES =
       List.of(
@@ -120,7 +120,7 @@ class HostileInputTest {
   @CsvSource({
     "(,10000,too-deep",
     "1+,100000,too-long",
-    "- ,100000,too-long",
+    "'- ',100000,too-long",
     "2^,100000,too-long",
     "9,100000,too-long",
     "x,100000,too-long",
