@@ -121,7 +121,17 @@ public final class Study {
           "a curve needs frequencies: this file has no sweep",
           "add a line such as 'sweep 10 Hz to 1 MHz', or use --sweep or --at");
     }
-    return findings.hasErrors() ? Optional.empty() : Optional.of(draw(network, hz.orElseThrow()));
+    if (findings.hasErrors()) {
+      return Optional.empty();
+    }
+    CurveTable table = draw(network, hz.orElseThrow());
+    if (table.countUndetermined() > 0) {
+      findings.warning(
+          "undetermined",
+          source.text().whole(),
+          "impedances that could not be determined: " + table.countUndetermined());
+    }
+    return Optional.of(table);
   }
 
   private CurveTable draw(Network network, double[] hz) {

@@ -63,7 +63,7 @@ class LoadmarkTest {
     Run run = runWith(BROKEN, "check", "-");
     assertThat(run.err()).isEmpty();
     assertThat(run.out())
-        .startsWith("BROKEN   -\n         Stand-in\n         1 judgement: 1 broken")
+        .startsWith("BROKEN   -\n         Stand-in\n         1 judgement, broken")
         .contains("BROKEN     line 7    limit change 2 %\n")
         .contains("worst     change 10.00 % at 10 Hz; allowed: at most 2 %\n")
         .contains("without   100.0 Ω ∠ 0°    100.0 Ω + j0 Ω\n")

@@ -118,7 +118,7 @@ class CheckTextTest {
                      3 files: 1 invalid, 1 broken, 1 kept
             INVALID  slip.zin      1 error
             BROKEN   pack-tap.zin  5 judgements: 2 broken, 3 kept
-            kept     kept.zin      1 judgement: 1 kept
+            kept     kept.zin      1 judgement, kept
             """);
     assertThat(CheckText.writeVerdicts(List.of(kept, invalid), Style.PLAIN))
         .isEqualTo("kept     kept.zin\nINVALID  slip.zin\n");
