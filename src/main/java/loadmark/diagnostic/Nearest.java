@@ -17,8 +17,9 @@ public final class Nearest {
   private Nearest() {}
 
   /**
-   * The nearest of the words, the first in alphabetical order where several are; empty where all
-   * are too far: more than one slip in up to four letters, two in up to eight, else three.
+   * The nearest of the words; where several are, one of the same length, then the first in
+   * alphabetical order; empty where all are too far: more than one slip in up to four letters, two
+   * in up to eight, else three.
    */
   public static Optional<String> find(String text, Collection<String> words) {
     if (text.length() > LONGEST) {
@@ -30,7 +31,10 @@ public final class Nearest {
         .filter(word -> Math.abs(word.length() - text.length()) <= allowed)
         .map(word -> new Candidate(word, distance(text, word)))
         .filter(c -> c.distance <= allowed || c.word.equalsIgnoreCase(text))
-        .min(Comparator.comparingInt(Candidate::distance).thenComparing(Candidate::word))
+        .min(
+            Comparator.comparingInt(Candidate::distance)
+                .thenComparing(c -> c.word.length() != text.length())
+                .thenComparing(Candidate::word))
         .map(Candidate::word);
   }
 

@@ -70,11 +70,12 @@ final class BandFinder {
     return new Found(bands, worst, unknown);
   }
 
-  /** The first of the worst. */
+  /** The first of the worst among those that are known. */
   static Optional<Sample> worstOf(List<Sample> samples) {
-    return samples.stream()
+    List<Sample> known = samples.stream().filter(Sample::isKnown).toList();
+    return known.stream()
         .max(Comparator.comparingDouble(Sample::excess))
-        .flatMap(best -> samples.stream().filter(one -> Peak.isTie(one, best)).findFirst());
+        .flatMap(best -> known.stream().filter(one -> Peak.isTie(one, best)).findFirst());
   }
 
   private List<Sample> withProbes(List<Sample> grid) {

@@ -22,8 +22,7 @@ final class Extremum {
 
   /** The highest sample seen between two frequencies, starting at {@code here} or beside it. */
   static Sample highest(Gauge gauge, double lowHz, Sample here, double highHz) {
-    Sample peak = search(gauge, lowHz, here, highHz, 1);
-    return Pole.check(gauge, lowHz, peak, highHz);
+    return Pole.check(gauge, search(gauge, lowHz, here, highHz, 1));
   }
 
   /** The lowest sample seen. */

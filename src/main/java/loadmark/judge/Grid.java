@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.SortedSet;
 import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
 import loadmark.network.Band;
 import loadmark.response.Comparison;
 import loadmark.response.Loading;
@@ -66,17 +67,19 @@ final class Grid {
     return grid;
   }
 
-  /** The middles of the intervals on both sides of each point that is off the curve. */
+  /** The middles of the intervals on both sides of each point off its curve, widest first. */
   private static double[] between(List<GridPoint> grid, boolean[] off) {
-    DoubleStream.Builder middles = DoubleStream.builder();
-    for (int i = 0; i + 1 < grid.size(); i++) {
-      GridPoint low = grid.get(i);
-      GridPoint high = grid.get(i + 1);
-      if ((off[i] || off[i + 1]) && high.x() - low.x() > LEAST_STEP) {
-        middles.add(Math.sqrt(low.hz()) * Math.sqrt(high.hz()));
-      }
-    }
-    return middles.build().limit(Math.max(0, MOST_POINTS - grid.size())).toArray();
+    return IntStream.range(0, grid.size() - 1)
+        .filter(i -> (off[i] || off[i + 1]) && width(grid, i) > LEAST_STEP)
+        .boxed()
+        .sorted(Comparator.comparingDouble((Integer i) -> -width(grid, i)))
+        .limit(MOST_POINTS - grid.size())
+        .mapToDouble(i -> Math.sqrt(grid.get(i).hz()) * Math.sqrt(grid.get(i + 1).hz()))
+        .toArray();
+  }
+
+  private static double width(List<GridPoint> grid, int i) {
+    return grid.get(i + 1).x() - grid.get(i).x();
   }
 
   /** The points of a grid inside a band. */

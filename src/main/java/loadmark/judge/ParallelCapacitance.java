@@ -17,7 +17,7 @@ record ParallelCapacitance(OptionalDouble from, OptionalDouble to) implements Me
       return Unknowns.unsolved();
     }
     if (loading.hz() == 0) {
-      return new Reading.Unknown("no capacitance at DC");
+      return new Reading.Unknown("no capacitance");
     }
     if (z.isZero()) {
       return new Reading.Unknown("a short has no parallel capacitance");

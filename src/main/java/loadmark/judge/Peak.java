@@ -8,7 +8,7 @@ import java.util.stream.IntStream;
 /** The worst point of a run of samples and of what lies between them. */
 final class Peak {
   /** The most maxima that are looked into: those which could be the highest. */
-  private static final int MOST_MAXIMA = 24;
+  private static final int MOST_MAXIMA = 50;
 
   /** How much farther than its neighbours differ a maximum may lie. */
   private static final double REACH = 4;
@@ -26,6 +26,10 @@ final class Peak {
    * empty where nothing is known.
    */
   static Optional<Sample> of(Gauge gauge, List<Sample> samples, int from, int to) {
+    Optional<Sample> highest = BandFinder.worstOf(samples.subList(from, to + 1));
+    if (highest.isEmpty()) {
+      return highest;
+    }
     List<Integer> maxima =
         IntStream.rangeClosed(from, to)
             .filter(i -> samples.get(i).isKnown() && isMaximum(samples, i))
@@ -33,15 +37,12 @@ final class Peak {
             .sorted(Comparator.comparingDouble((Integer i) -> -promise(samples, i)))
             .limit(MOST_MAXIMA)
             .toList();
-    Sample best = null;
+    Sample best = highest.get();
     for (int i : maxima) {
-      if (best == null || promise(samples, i) > best.excess()) {
+      if (promise(samples, i) >= best.excess()) {
         Sample polished = polish(gauge, samples, i);
-        best = best == null || polished.excess() > best.excess() ? polished : best;
+        best = polished.excess() > best.excess() ? polished : best;
       }
-    }
-    if (best == null) {
-      return Optional.empty();
     }
     for (Sample end : List.of(samples.get(from), samples.get(to))) {
       if (end.isKnown() && isTie(end, best)) {
@@ -53,7 +54,8 @@ final class Peak {
 
   /** Whether {@code one} is as bad as {@code best}, rounding aside. */
   static boolean isTie(Sample one, Sample best) {
-    return one.excess() >= best.excess() - TIE * Math.max(1, Math.abs(best.excess()));
+    return one.excess() == best.excess()
+        || one.excess() >= best.excess() - TIE * Math.max(1, Math.abs(best.excess()));
   }
 
   private static boolean isMaximum(List<Sample> samples, int i) {

@@ -18,9 +18,8 @@ final class Pole {
   private Pole() {}
 
   /** The peak, its values empty where they have no bound. */
-  static Sample check(Gauge gauge, double lowHz, Sample peak, double highHz) {
-    boolean inside = peak.hz() / (1 + FARTHEST) > lowHz && peak.hz() * (1 + FARTHEST) < highHz;
-    if (!inside || !(peak.reading() instanceof Reading.Known known) || !known.broken()) {
+  static Sample check(Gauge gauge, Sample peak) {
+    if (!(peak.reading() instanceof Reading.Known known) || !known.broken()) {
       return peak;
     }
     boolean value = grows(gauge, peak, Reading.Known::value);

@@ -45,4 +45,15 @@ public sealed interface OnePort {
   static OnePort parallel(List<OnePort> members) {
     return members.size() == 1 ? members.get(0) : new Parallel(members);
   }
+
+  /** Whether this joins its ends at every frequency: 0 Ω, alone or beside anything. */
+  static boolean isLink(OnePort one) {
+    if (one instanceof Element element) {
+      return element.kind() == ElementKind.RESISTANCE && element.value().nominal() == 0;
+    }
+    if (one instanceof Series series) {
+      return series.members().stream().allMatch(OnePort::isLink);
+    }
+    return ((Parallel) one).members().stream().anyMatch(OnePort::isLink);
+  }
 }

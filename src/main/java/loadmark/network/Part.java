@@ -1,6 +1,5 @@
 package loadmark.network;
 
-import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -19,17 +18,4 @@ public record Part(
     OnePort value,
     String text,
     OptionalDouble rated,
-    int line) {
-
-  /** The value of the element that the statement names, without what its properties add. */
-  public Optional<OnePort.Element> findMainElement() {
-    return first(value);
-  }
-
-  private static Optional<OnePort.Element> first(OnePort one) {
-    if (one instanceof OnePort.Element element) {
-      return Optional.of(element);
-    }
-    return one instanceof OnePort.Series series ? first(series.members().get(0)) : Optional.empty();
-  }
-}
+    int line) {}

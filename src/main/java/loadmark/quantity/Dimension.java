@@ -1,5 +1,6 @@
 package loadmark.quantity;
 
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -58,5 +59,54 @@ public record Dimension(
             new Dimension(
                 metre / 2, kilogram / 2, second / 2, ampere / 2, angle / 2, level / 2, code / 2))
         : Optional.empty();
+  }
+
+  /** In words, for messages: {@code a resistance (Ω)}, {@code a plain number}. */
+  public String describe() {
+    for (Named named : NAMED) {
+      if (named.dimension.equals(this)) {
+        return named.words;
+      }
+    }
+    return "a value in " + inBaseUnits();
+  }
+
+  private record Named(Dimension dimension, String words) {}
+
+  private static final List<Named> NAMED =
+      List.of(
+          new Named(NUMBER, "a plain number"),
+          new Named(RESISTANCE, "a resistance (Ω)"),
+          new Named(CONDUCTANCE, "a conductance (S)"),
+          new Named(CAPACITANCE, "a capacitance (F)"),
+          new Named(INDUCTANCE, "an inductance (H)"),
+          new Named(FREQUENCY, "a frequency (Hz)"),
+          new Named(TIME, "a time (s)"),
+          new Named(LENGTH, "a length (m)"),
+          new Named(SPEED, "a speed (m/s)"),
+          new Named(VOLTAGE, "a voltage (V)"),
+          new Named(CURRENT, "a current (A)"),
+          new Named(POWER, "a power (W)"),
+          new Named(ANGLE, "an angle (deg)"),
+          new Named(LEVEL, "a value in dB"),
+          new Named(CODE, "a number of converter codes (lsb)"));
+
+  private String inBaseUnits() {
+    StringBuilder units = new StringBuilder();
+    append(units, "kg", kilogram);
+    append(units, "m", metre);
+    append(units, "s", second);
+    append(units, "A", ampere);
+    append(units, "deg", angle);
+    append(units, "dB", level);
+    append(units, "lsb", code);
+    return units.toString();
+  }
+
+  private static void append(StringBuilder units, String unit, int exponent) {
+    if (exponent != 0) {
+      units.append(units.isEmpty() ? "" : "·").append(unit);
+      units.append(exponent == 1 ? "" : "^" + exponent);
+    }
   }
 }

@@ -31,8 +31,8 @@ public final class Units {
           "%", new Unit(1e-2, Dimension.NUMBER, "%"),
           "ppm", new Unit(1e-6, Dimension.NUMBER, "ppm"),
           "dB", new Unit(1, Dimension.LEVEL, "dB"),
-          "deg", new Unit(Math.PI / 180, Dimension.ANGLE, "deg"),
-          "°", new Unit(Math.PI / 180, Dimension.ANGLE, "deg"),
+          "deg", new Unit(1, Dimension.ANGLE, "deg"),
+          "°", new Unit(1, Dimension.ANGLE, "deg"),
           "lsb", new Unit(1, Dimension.CODE, "lsb"),
           "c", new Unit(SPEED_OF_LIGHT, Dimension.SPEED, "c"));
 
@@ -76,8 +76,12 @@ public final class Units {
 
   private Units() {}
 
-  /** Why a text is no unit, and what to write instead. */
-  public record Reason(String message, String hint) {}
+  /**
+   * Why a text is no unit, and what to write instead.
+   *
+   * @param code that of the finding
+   */
+  public record Reason(String code, String message, String hint) {}
 
   /** The unit written so; empty where there is none. */
   public static Optional<Unit> find(String text) {
@@ -100,7 +104,7 @@ public final class Units {
   private static Optional<Unit> findSimple(String word) {
     Dimension own = PREFIXED.get(word);
     if (own != null) {
-      return Optional.of(new Unit(1, own, word));
+      return Optional.of(new Unit(base(own), own, word));
     }
     if (word.isEmpty()) {
       return Optional.empty();
@@ -109,7 +113,12 @@ public final class Units {
     Dimension dimension = PREFIXED.get(word.substring(1));
     return factor == null || dimension == null
         ? Optional.empty()
-        : Optional.of(new Unit(factor, dimension, word));
+        : Optional.of(new Unit(factor * base(dimension), dimension, word));
+  }
+
+  /** Angles are kept in degrees, so that those which people write stay exact. */
+  private static double base(Dimension dimension) {
+    return dimension.equals(Dimension.ANGLE) ? Math.toDegrees(1) : 1;
   }
 
   /** The factor of a prefix that stands without a unit: 1000 for {@code k}. */
@@ -122,11 +131,12 @@ public final class Units {
   public static Reason explain(String text) {
     String word = unify(text);
     if (word.equals("K")) {
-      return new Reason("`K` is no prefix", "kilo is written `k`");
+      return new Reason("wrong-prefix", "`K` is no prefix", "kilo is written `k`");
     }
     Optional<String> near = nearest(word);
     if (near.isEmpty()) {
       return new Reason(
+          "unknown-unit",
           "`" + text + "` is no unit",
           "units are " + String.join(", ", PREFIXED.keySet()) + ", %, ppm, dB, deg, °, lsb and c");
     }
@@ -135,7 +145,9 @@ public final class Units {
         sameLetters
             ? "`" + text + "` is no unit: capital and small letters differ"
             : "`" + text + "` is no unit";
-    return new Reason(message, "write `" + near.get() + "`");
+    boolean prefix = sameLetters && near.get().substring(1).equals(word.substring(1));
+    return new Reason(
+        prefix ? "wrong-prefix" : "unknown-unit", message, "write `" + near.get() + "`");
   }
 
   /** A unit that differs in the case of its letters or is spelt out. */

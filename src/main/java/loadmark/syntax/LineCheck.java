@@ -4,9 +4,10 @@ import java.util.ArrayDeque;
 import java.util.Collection;
 import java.util.Deque;
 import java.util.List;
-import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.Nearest;
 import loadmark.syntax.antlr.NetworkParser;
@@ -18,7 +19,10 @@ final class LineCheck {
   static final int MOST_DEPTH = 200;
 
   /** Operators in one statement; what follows may go as deep as their chain is long. */
-  static final int MOST_OPERATORS = 1000;
+  static final int MOST_OPERATORS = 200;
+
+  /** Tokens in one statement. */
+  static final int MOST_TOKENS = 100_000;
 
   /** Characters in a name, number or quoted text. */
   static final int MOST_CHARACTERS = 1000;
@@ -33,6 +37,11 @@ final class LineCheck {
           NetworkParser.POWER,
           NetworkParser.PLUS_MINUS);
 
+  private static final Set<String> ALL_STATEMENTS =
+      Stream.of(Words.STATEMENTS, Words.LATER_STATEMENTS)
+          .flatMap(Set::stream)
+          .collect(Collectors.toCollection(TreeSet::new));
+
   private final Places places;
   private final Findings findings;
 
@@ -43,6 +52,11 @@ final class LineCheck {
 
   /** Whether the line may go to the grammar; if not there is one finding on it. */
   boolean passes(List<Token> line) {
+    if (line.size() > MOST_TOKENS) {
+      findings.error(
+          "too-long", places.of(line.get(MOST_TOKENS)), "the statement is too long from here on");
+      return false;
+    }
     return tokensAreWhole(line) && bracketsClose(line);
   }
 
@@ -170,21 +184,10 @@ final class LineCheck {
         "unknown-statement",
         places.of(first),
         "no statement is called " + Quoted.of(first),
-        suggestion(first.getText(), allStatements()));
+        suggestion(first.getText(), ALL_STATEMENTS));
   }
 
-  /** The statement that a misspelt word stands for. */
-  static Optional<String> nearestStatement(String text) {
-    return Nearest.find(text, allStatements());
-  }
-
-  private static Set<String> allStatements() {
-    Set<String> words = new TreeSet<>(Words.STATEMENTS);
-    words.addAll(Words.LATER_STATEMENTS);
-    return words;
-  }
-
-  static String suggestion(String text, Collection<String> words) {
+  private static String suggestion(String text, Collection<String> words) {
     return Nearest.find(text, words)
         .map(word -> "did you mean `" + word + "`?")
         .orElse("known are " + String.join(", ", new TreeSet<>(words)));

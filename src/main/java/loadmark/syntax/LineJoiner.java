@@ -26,6 +26,9 @@ final class LineJoiner {
           NetworkParser.DIVIDED,
           NetworkParser.POWER);
 
+  private static final Set<Integer> BEHIND_WORD =
+      Set.of(NetworkParser.NUMBER, NetworkParser.EQUALS);
+
   /** What follows the name in the first statements' words, where that name is a word itself. */
   private static final Set<String> BEHIND_NAME = Set.of("=", "--", ".", "shunt", "series");
 
@@ -103,7 +106,7 @@ final class LineJoiner {
       return false;
     }
     if (!Words.isWord(next)) {
-      return Words.isName(next) || next.getType() == NetworkParser.NUMBER;
+      return Words.isName(next) || BEHIND_WORD.contains(next.getType());
     }
     return switch (tokens.get(i).getText()) {
       case "limit" -> LineReader.isCriterion(next);

@@ -13,7 +13,9 @@ import org.antlr.v4.runtime.RecognitionException;
 import org.antlr.v4.runtime.RuleContext;
 import org.antlr.v4.runtime.Token;
 import org.antlr.v4.runtime.atn.ATN;
+import org.antlr.v4.runtime.atn.ATNState;
 import org.antlr.v4.runtime.atn.PredictionMode;
+import org.antlr.v4.runtime.atn.RuleTransition;
 import org.antlr.v4.runtime.misc.IntervalSet;
 import org.antlr.v4.runtime.misc.ParseCancellationException;
 
@@ -57,15 +59,25 @@ final class LineParser {
   private static final class StopAtFirst extends DefaultErrorStrategy {
     @Override
     public void sync(Parser parser) {
-      ATN atn = parser.getATN();
-      int next = parser.getInputStream().LA(1);
-      IntervalSet here = atn.nextTokens(atn.states.get(parser.getState()));
-      if (here.contains(next)) {
-        return;
-      }
-      if (!here.contains(Token.EPSILON) || !parser.getExpectedTokens().contains(next)) {
+      if (!fits(parser, parser.getInputStream().LA(1))) {
         throw new Stopped(parser, parser.getCurrentToken());
       }
+    }
+
+    /** Asks the rule being read and, as far as it may end here, the rules that called it. */
+    private static boolean fits(Parser parser, int next) {
+      ATN atn = parser.getATN();
+      IntervalSet here = atn.nextTokens(atn.states.get(parser.getState()));
+      RuleContext rule = parser.getContext();
+      while (!here.contains(next)) {
+        if (!here.contains(Token.EPSILON) || rule.invokingState < 0) {
+          return false;
+        }
+        ATNState caller = atn.states.get(rule.invokingState);
+        here = atn.nextTokens(((RuleTransition) caller.transition(0)).followState);
+        rule = rule.getParent();
+      }
+      return true;
     }
 
     @Override

@@ -99,9 +99,8 @@ final class LineReader {
     }
     String word = line.get(0).getText();
     boolean known = Words.beginsStatement(line.get(0));
-    boolean declares = Words.declares(LineCheck.nearestStatement(word).orElse(word));
     Optional<Name> declared =
-        (known ? Words.declares(word) : declares) && line.size() > 1 && Words.isName(line.get(1))
+        Words.declares(word) && line.size() > 1 && Words.isName(line.get(1))
             ? Optional.of(names.read(line.get(1)))
             : Optional.empty();
     return new Statement.Broken(known ? word : "", declared, mentioned, places.firstLine(line));

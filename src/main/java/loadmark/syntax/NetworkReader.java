@@ -13,6 +13,9 @@ import org.antlr.v4.runtime.Token;
 
 /** Reads network files, and pieces of their language that stand on a command line. */
 public final class NetworkReader {
+  /** Errors after which the rest of a file is not read: nobody has made them one by one. */
+  static final int MOST_ERRORS = 1000;
+
   private NetworkReader() {}
 
   /**
@@ -30,6 +33,14 @@ public final class NetworkReader {
     List<Statement> statements = new ArrayList<>();
     for (int i = 0; i < lines.size(); i++) {
       List<Token> line = lines.get(i);
+      if (findings.errorCount() >= MOST_ERRORS) {
+        findings.error(
+            "too-many",
+            places.of(line.get(0)),
+            "too many errors: the file is not read from here on",
+            "is it the right file?");
+        break;
+      }
       int end = begins(line, Words.BLOCK) ? findEnd(lines, i) : i;
       if (line.stream().anyMatch(token -> unreadable.contains(token.getLine()))) {
         statements.add(reader.broken(line));
@@ -96,6 +107,9 @@ public final class NetworkReader {
     int line = 0;
     for (String text : source.lines()) {
       line++;
+      if (found.size() >= MOST_ERRORS) {
+        break;
+      }
       for (int i = 0, column = 1; i < text.length(); column++) {
         int c = text.codePointAt(i);
         if (isUnreadable(c)) {

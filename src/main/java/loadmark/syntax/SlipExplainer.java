@@ -1,27 +1,27 @@
 package loadmark.syntax;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
+import java.util.stream.Collectors;
 import loadmark.diagnostic.Finding;
 import loadmark.diagnostic.Nearest;
 import loadmark.diagnostic.Severity;
 import loadmark.diagnostic.Span;
+import loadmark.syntax.Statement.PropertyKind;
 import loadmark.syntax.antlr.NetworkParser;
 import org.antlr.v4.runtime.Token;
 
 /** Says in a user's words why a line could not be read. */
 final class SlipExplainer {
   private static final Set<String> PROPERTIES =
-      Set.of(
-          "series resistance",
-          "series inductance",
-          "parallel capacitance",
-          "leakage",
-          "self-resonance",
-          "rated",
-          "tolerance");
+      Arrays.stream(PropertyKind.values())
+          .map(PropertyKind::words)
+          .filter(words -> !Words.isLaterProperty(words))
+          .collect(Collectors.toCollection(TreeSet::new));
   private static final Set<String> CRITERIA =
       Set.of(
           "change",
@@ -122,7 +122,7 @@ final class SlipExplainer {
           slip, "missing-property", "a property is missing behind " + Quoted.of(before), known());
     }
     String text = slip.token().getText();
-    if (Words.LATER_PROPERTIES.contains(text)) {
+    if (Words.isLaterProperty(text)) {
       return finding(
           slip,
           "not-known-yet",
@@ -144,7 +144,7 @@ final class SlipExplainer {
   }
 
   private static String known() {
-    return "properties are " + String.join(", ", PROPERTIES.stream().sorted().toList());
+    return "properties are " + String.join(", ", PROPERTIES);
   }
 
   private Finding criterion(Slip slip) {
@@ -192,14 +192,18 @@ final class SlipExplainer {
       return finding(
           slip, "missing-joint", "the second node is missing", "write two nodes: `a -- b`");
     }
-    boolean single = slip.token().getType() == NetworkParser.MINUS;
+    if (slip.token().getType() == NetworkParser.MINUS) {
+      return finding(
+          slip,
+          "missing-joint",
+          "nodes and parts are joined by `--`, not by `-`",
+          "a name with a hyphen stands in quotes");
+    }
     return finding(
         slip,
         "missing-joint",
         "`--` is missing" + beforeOf(slip),
-        single
-            ? "nodes and parts are joined by two hyphens; a name with a hyphen stands in quotes"
-            : "nodes and parts are joined by `--`");
+        "nodes and parts are joined by `--`");
   }
 
   /** A wire may end where it may also go on; then only a name says that a joint was forgotten. */
@@ -217,49 +221,67 @@ final class SlipExplainer {
 
   private Finding leftOver(Slip slip) {
     Token token = slip.token();
-    Token before = slip.tokens().get(slip.index() - 1);
-    List<String> words = expectedWords(slip);
-    boolean comma = slip.expects(NetworkParser.COMMA);
-    if (comma && isAfterComma(slip, token.getText())) {
+    if (slip.expects(NetworkParser.COMMA) && isAfterComma(slip)) {
       return finding(slip, "missing-comma", "a comma is missing" + beforeOf(slip), "");
     }
-    Optional<String> meant = Nearest.find(token.getText(), words);
-    if (meant.isEmpty() && slip.index() > 1 && isUnit(slip, slip.index() - 1)) {
-      Optional<String> unitMeant = Nearest.find(before.getText(), words);
-      if (unitMeant.isPresent()) {
-        return finding(
-            places.of(before),
-            "left-over",
-            Quoted.of(before) + " is no unit",
-            "did you mean `" + unitMeant.get() + "`?");
-      }
-      if (Words.isName(token) && before.getText().length() == 1) {
-        String joined = before.getText() + token.getText();
-        return finding(
-            slip,
-            "left-over",
-            "prefix and unit stand together",
-            "write `" + Quoted.cut(joined) + "`");
-      }
+    Optional<Finding> misspelt = misspeltUnit(slip);
+    if (misspelt.isPresent()) {
+      return misspelt.get();
+    }
+    Token before = slip.tokens().get(slip.index() - 1);
+    boolean loosePrefix = isUnit(slip) && before.getText().length() == 1 && Words.isName(token);
+    if (loosePrefix && Nearest.find(token.getText(), expectedWords(slip)).isEmpty()) {
+      String joined = before.getText() + token.getText();
+      return finding(
+          slip,
+          "left-over",
+          "prefix and unit stand together",
+          "write `" + Quoted.cut(joined) + "`");
     }
     return finding(
         slip,
         "left-over",
         "the statement could end before " + Quoted.of(token) + ", which does not fit",
-        meant.map(word -> "did you mean `" + word + "`?").orElse(""));
+        didYouMean(token, expectedWords(slip)));
   }
 
-  private static boolean isUnit(Slip slip, int index) {
-    return slip.tokens().get(index - 1).getType() == NetworkParser.NUMBER
-        && slip.tokens().get(index).getType() == NetworkParser.NAME;
+  /** A word misspelt behind a number was taken for its unit: {@code 50 par decade}. */
+  private Optional<Finding> misspeltUnit(Slip slip) {
+    if (slip.index() < 2 || !isUnit(slip)) {
+      return Optional.empty();
+    }
+    Token unit = slip.tokens().get(slip.index() - 1);
+    return Nearest.find(unit.getText(), expectedWords(slip))
+        .map(
+            word ->
+                finding(
+                    places.of(unit),
+                    "syntax",
+                    Quoted.of(unit) + " has no meaning here",
+                    "did you mean `" + word + "`?"));
+  }
+
+  private static String didYouMean(Token token, List<String> words) {
+    return Nearest.find(token.getText(), words)
+        .map(word -> "did you mean `" + word + "`?")
+        .orElse("");
+  }
+
+  /** Whether the token before the slip was read as a number's unit. */
+  private static boolean isUnit(Slip slip) {
+    return slip.index() > 1
+        && slip.tokens().get(slip.index() - 2).getType() == NetworkParser.NUMBER
+        && slip.tokens().get(slip.index() - 1).getType() == NetworkParser.NAME;
   }
 
   /** Whether the word would fit if a comma stood before it. */
-  private static boolean isAfterComma(Slip slip, String text) {
+  private static boolean isAfterComma(Slip slip) {
+    String text = slip.token().getText();
     return switch (slip.tokens().get(0).getText()) {
       case "resistor", "capacitor", "inductor", "impedance" ->
           PROPERTIES.stream().anyMatch(p -> p.equals(text) || p.startsWith(text + " "));
       case "port" -> Set.of("terminated", "driven", "mains").contains(text);
+      case "case" -> Words.isName(slip.token());
       default -> false;
     };
   }
@@ -267,16 +289,18 @@ final class SlipExplainer {
   private Finding words(Slip slip) {
     List<String> words = expectedWords(slip);
     List<String> quoted = words.stream().map(Quoted::of).toList();
-    String due = words.size() <= FEW ? String.join(" or ", quoted) : "something else";
+    String due = words.size() <= FEW ? String.join(" or ", quoted) : "something";
     if (slip.atEnd()) {
       return finding(slip, "syntax", due + " is missing at the end", "");
     }
-    Optional<String> meant = Nearest.find(slip.token().getText(), words);
-    return finding(
-        slip,
-        "syntax",
-        due + " is expected, not " + Quoted.of(slip.token()),
-        meant.map(word -> "did you mean `" + word + "`?").orElse(""));
+    return misspeltUnit(slip)
+        .orElseGet(
+            () ->
+                finding(
+                    slip,
+                    "syntax",
+                    due + " is missing" + beforeOf(slip),
+                    didYouMean(slip.token(), words)));
   }
 
   /** The words that could have stood, and where there are none the signs. */

@@ -38,9 +38,6 @@ final class Words {
   /** Limits that a later version reads. */
   static final Set<String> LATER_LIMITS = Set.of("resonance", "level", "settling");
 
-  /** First words of the properties that a later version reads. */
-  static final Set<String> LATER_PROPERTIES = Set.of("loss", "quality");
-
   /** Statements that are read. */
   static final Set<String> STATEMENTS = statements();
 
@@ -86,6 +83,11 @@ final class Words {
     boolean unquoted = token.getType() == NetworkParser.NAME || isWord(token);
     return unquoted
         && (STATEMENTS.contains(text) || LATER_STATEMENTS.contains(text) || text.equals(END));
+  }
+
+  /** Whether a property begins with a word that a later version reads. */
+  static boolean isLaterProperty(String words) {
+    return words.startsWith("loss") || words.startsWith("quality");
   }
 
   static boolean declares(String statement) {
