@@ -218,7 +218,7 @@ class CheckTextTest {
       Case one = new Case(name(random), List.of(first, second), List.of(second), 0);
       Limit limit =
           Samples.limit(
-              Criterion.values()[random.nextInt(Criterion.values().length)],
+              List.of(Criterion.values()).get(random.nextInt(Criterion.values().length)),
               Bound.between(random.nextDouble() * 1e-9, 1e9 + random.nextDouble()),
               1 + random.nextInt(99999),
               "limit " + name(random) + " " + name(random));
