@@ -15,12 +15,16 @@ import loadmark.study.Outcome;
 public final class CheckText {
   private CheckText() {}
 
-  /** Every judged file in the order given; after several files a summary, worst first. */
-  public static String write(List<FileResult> files, Style style) {
+  /**
+   * Every judged file in the order given; after several files a summary, worst first.
+   *
+   * @param options as given, each with its value
+   */
+  public static String write(List<FileResult> files, List<String> options, Style style) {
     StringBuilder text = new StringBuilder();
     for (FileResult file : files) {
       if (file instanceof FileResult.Judged judged) {
-        text.append(new FileText(judged, style).write()).append('\n');
+        text.append(new FileText(judged, options, style).write()).append('\n');
       }
     }
     if (files.size() > 1) {

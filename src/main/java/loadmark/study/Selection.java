@@ -47,7 +47,7 @@ record Selection(Optional<String> port, Optional<String> caseName) {
     }
     String hint =
         Nearest.find(chosen.get(), names)
-            .map(n -> "did you mean --" + kind + " " + n + "?")
+            .map(n -> "did you mean `--" + kind + " " + n + "`?")
             .orElse(
                 "it has "
                     + String.join(", ", names.subList(0, Math.min(MOST_NAMES, names.size())))
@@ -55,7 +55,7 @@ record Selection(Optional<String> port, Optional<String> caseName) {
     findings.error(
         "unknown-" + kind,
         source.whole(),
-        "this file has no " + kind + " '" + chosen.get() + "', which --" + kind + " asks for",
+        "this file has no " + kind + " `" + chosen.get() + "`, which --" + kind + " asks for",
         hint);
   }
 
