@@ -27,6 +27,7 @@ final class ExampleExpectations {
           Map.entry("supply-rail", BROKEN),
           Map.entry("powered-device", KEPT),
           Map.entry("strain-bridge", KEPT),
+          Map.entry("thermistor-tap", BROKEN),
           Map.entry("touch-current", KEPT));
 
   private final List<Expectation> all = new ArrayList<>();
@@ -119,6 +120,16 @@ final class ExampleExpectations {
         10,
         1e6,
         Measure.change(0.03)); // 0.0158 at 10 Hz
+
+    at("thermistor-tap", ExampleImpedances::thermistorTap, "sense");
+    Measure window = Measure.magnitude(6e3, 7.5e3);
+    Set<String> both = Set.of("logger", "meter");
+    alone("logger", KEPT, 1, 100e3, Measure.change(0.007)); // 0.00683 at 1 Hz
+    alone("logger", KEPT, 1, 100, window);
+    alone("meter", KEPT, 1, 100e3, Measure.change(0.007)); // 0.00596 at 100 kHz
+    alone("meter", KEPT, 1, 100, window);
+    add("all", both, Set.of(), 0, BROKEN, 1, 100e3, Measure.change(0.007)); // 0.00751 at 1 Hz
+    add("all", both, Set.of(), 0, KEPT, 1, 100, window);
   }
 
   private void windows() {

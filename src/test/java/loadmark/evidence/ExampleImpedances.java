@@ -143,6 +143,15 @@ final class ExampleImpedances {
         shunt(on, "amplifier", parallel(r(100e3), c(hz, 470e-12))));
   }
 
+  static Complex thermistorTap(String port, Set<String> on, double hz) {
+    return parallel(
+        r(22e3),
+        r(10e3),
+        series(r(0.5), c(hz, 10e-9)),
+        shunt(on, "logger", parallel(r(1e6), series(r(1e3), c(hz, 15e-12)))),
+        shunt(on, "meter", parallel(r(10e6), c(hz, 60e-12))));
+  }
+
   static Complex touchCurrent(String port, Set<String> on, double hz) {
     Complex skin = parallel(r(1500), c(hz, 220e-9));
     Complex end = parallel(c(hz, 22e-9), shunt(on, "meter", parallel(r(1e6), c(hz, 200e-12))));

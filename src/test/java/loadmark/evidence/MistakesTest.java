@@ -62,7 +62,8 @@ class MistakesTest {
   }
 
   private void judgeAsText(Path mistake) throws IOException {
-    Path output = folder.resolve("report.txt");
+    Path empty = Files.createDirectory(folder.resolve(mistake));
+    Path output = empty.resolve("report.txt");
     Run run = runWithPatience("check", "--output", output.toString(), input(mistake));
     assertThat(run.status()).isEqualTo(Run.INVALID);
     for (String finding : expected(mistake)) {
@@ -70,7 +71,7 @@ class MistakesTest {
       assertThat(run.err()).contains(input(mistake) + ":" + words[0] + ": " + words[1] + ": ");
     }
     OutsideWords.areKeptFrom(run);
-    try (Stream<Path> written = Files.list(folder)) {
+    try (Stream<Path> written = Files.list(empty)) {
       assertThat(written).isEmpty();
     }
   }
