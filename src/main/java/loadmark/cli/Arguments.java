@@ -114,12 +114,12 @@ final class Arguments {
     if (format.isEmpty()) {
       String hint =
           Nearest.find(word.get(), Format.words())
-              .map(n -> "did you mean " + n + "?")
+              .map(n -> "did you mean `" + n + "`?")
               .orElse("--format takes " + String.join(", ", Format.words()));
       findings.error(
           "unknown-format",
           text.place(Options.FORMAT),
-          "there is no format '" + word.get() + "'",
+          "there is no format `" + word.get() + "`",
           hint);
     }
     return format.orElse(Format.TEXT);

@@ -53,7 +53,7 @@ final class CheckCommand {
       case TEXT ->
           asked.manner().quiet()
               ? CheckText.writeVerdicts(results, style)
-              : CheckText.write(results, style);
+              : CheckText.write(results, asked.request().options(), style);
       case JSON -> CheckJson.write(results, findings.sorted(), asked.request().options());
       case CSV -> CheckCsv.write(results);
     };

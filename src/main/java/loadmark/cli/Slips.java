@@ -60,9 +60,9 @@ final class Slips {
       findings.error(
           "unknown-command",
           text.place(first),
-          "there is no command '" + first + "'",
+          "there is no command `" + first + "`",
           Nearest.find(first, Options.COMMANDS)
-              .map(n -> "did you mean " + n + "?")
+              .map(n -> "did you mean `" + n + "`?")
               .orElse(help(command)));
       return;
     }
@@ -78,7 +78,7 @@ final class Slips {
       findings.error(
           "unclear-argument",
           text.place(first),
-          "'" + first + "' has no meaning here",
+          "`" + first + "` has no meaning here",
           help(command));
     }
   }
@@ -91,7 +91,7 @@ final class Slips {
         root ? Optional.of("options come after the command") : other(option);
     String hint =
         elsewhere
-            .or(() -> Nearest.find(option, known).map(n -> "did you mean " + n + "?"))
+            .or(() -> Nearest.find(option, known).map(n -> "did you mean `" + n + "`?"))
             .orElse(help(command));
     findings.error(
         "unknown-option",

@@ -2,12 +2,14 @@ package loadmark.quantity;
 
 import java.math.BigDecimal;
 import java.text.Normalizer;
+import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 
 /**
  * The units of the language and the SI prefixes before them (BIPM, The International System of
@@ -41,7 +43,9 @@ public final class Units {
   /** What people write in full or in another way, in lower case, and the unit they mean. */
   private static final Map<String, String> SPELT =
       Map.ofEntries(
-          Map.entry("ohms", "ohm"),
+          Map.entry("ohm", "Ω"),
+          Map.entry("ohms", "Ω"),
+          Map.entry("ωs", "Ω"),
           Map.entry("farad", "F"),
           Map.entry("farads", "F"),
           Map.entry("henry", "H"),
@@ -150,55 +154,31 @@ public final class Units {
         prefix ? "wrong-prefix" : "unknown-unit", message, "write `" + near.get() + "`");
   }
 
-  /** A unit that differs in the case of its letters or is spelt out. */
+  /** The unit that differs in the case of its letters only, or is spelt out. */
   private static Optional<String> nearest(String word) {
-    for (String unit : List.copyOf(PREFIXED.keySet())) {
-      if (unit.equalsIgnoreCase(word)) {
-        return Optional.of(unit);
-      }
+    Optional<String> alone =
+        sameLetters(word, PREFIXED.keySet()).or(() -> sameLetters(word, BARE.keySet()));
+    if (alone.isPresent() || word.length() < 2) {
+      return alone;
     }
-    for (String unit : BARE.keySet()) {
-      if (unit.equalsIgnoreCase(word)) {
-        return Optional.of(unit);
-      }
-    }
-    String lower = word.toLowerCase(Locale.ROOT);
-    String spelt = SPELT.get(lower);
-    if (spelt != null) {
-      return Optional.of(spelt);
-    }
-    if (word.length() < 2) {
-      return Optional.empty();
-    }
-    return nearestPrefix(word.charAt(0))
-        .flatMap(prefix -> nearestPrefixed(lower.substring(1)).map(unit -> prefix + unit))
-        .filter(unit -> find(unit).isPresent());
+    return nearestPrefix(word.substring(0, 1))
+        .flatMap(p -> sameLetters(word.substring(1), PREFIXED.keySet()).map(unit -> p + unit));
   }
 
-  private static Optional<String> nearestPrefix(char letter) {
-    String own = String.valueOf(letter);
-    if (PREFIXES.containsKey(own)) {
-      return Optional.of(own);
-    }
-    // `M` and `m` are both prefixes, so only the other letters can be in the wrong case.
-    String lower = own.toLowerCase(Locale.ROOT);
-    String upper = own.toUpperCase(Locale.ROOT);
-    return PREFIXES.containsKey(lower)
-        ? Optional.of(lower)
-        : Optional.of(upper).filter(PREFIXES::containsKey);
-  }
-
-  private static Optional<String> nearestPrefixed(String lower) {
-    if (lower.endsWith("/m")) {
-      return nearestPrefixed(lower.substring(0, lower.length() - 2)).map(unit -> unit + "/m");
-    }
-    String spelt = SPELT.get(lower);
-    if (lower.equals("ohm") || (spelt != null && spelt.equals("ohm"))) {
-      return Optional.of("ohm");
-    }
-    return PREFIXED.keySet().stream()
-        .filter(u -> u.equals(spelt) || u.toLowerCase(Locale.ROOT).equals(lower))
+  /** `M` and `m` are both prefixes, so only the other letters can be in the wrong case. */
+  private static Optional<String> nearestPrefix(String letter) {
+    return Stream.of(letter, letter.toLowerCase(Locale.ROOT), letter.toUpperCase(Locale.ROOT))
+        .map(Units::unify)
+        .filter(PREFIXES::containsKey)
         .findFirst();
+  }
+
+  private static Optional<String> sameLetters(String text, Collection<String> units) {
+    if (text.endsWith("/m")) {
+      return sameLetters(text.substring(0, text.length() - 2), PER_METRE).map(u -> u + "/m");
+    }
+    String meant = SPELT.getOrDefault(text.toLowerCase(Locale.ROOT), text);
+    return units.stream().filter(unit -> unit.equalsIgnoreCase(meant)).findFirst();
   }
 
   /** A number in a unit, in SI base units: see {@link #scaled(String, double)}. */

@@ -65,7 +65,18 @@ final class CaseText {
 
   /** On one line, safe to show. */
   private static String clean(String text) {
-    return Visible.of(String.join(" ", text.strip().split("\\s+", -1)));
+    StringBuilder line = new StringBuilder();
+    for (int i = 0; i < text.length(); i++) {
+      char c = text.charAt(i);
+      boolean space = c == ' ' || c == '\t' || c == '\r' || c == '\n';
+      boolean again = line.length() == 0 || line.charAt(line.length() - 1) == ' ';
+      if (!space) {
+        line.append(c);
+      } else if (!again) {
+        line.append(' ');
+      }
+    }
+    return Visible.of(line.toString().stripTrailing());
   }
 
   private void write(LimitJudgement judged) {

@@ -15,12 +15,16 @@ import loadmark.study.Outcome;
 public final class CheckText {
   private CheckText() {}
 
-  /** Every judged file in the order given; after several files a summary, worst first. */
-  public static String write(List<FileResult> files, Style style) {
+  /**
+   * Every judged file in the order given; after several files a summary, worst first.
+   *
+   * @param options as given, each with its value
+   */
+  public static String write(List<FileResult> files, List<String> options, Style style) {
     StringBuilder text = new StringBuilder();
     for (FileResult file : files) {
       if (file instanceof FileResult.Judged judged) {
-        text.append(new FileText(judged, style).write()).append('\n');
+        text.append(new FileText(judged, options, style).write()).append('\n');
       }
     }
     if (files.size() > 1) {
@@ -29,10 +33,10 @@ public final class CheckText {
     return text.toString().stripTrailing() + (text.isEmpty() ? "" : "\n");
   }
 
-  /** The verdict of each file, a line each. */
+  /** The verdict of each file, a line each; names are whole however long, for scripts. */
   public static String writeVerdicts(List<FileResult> files, Style style) {
     Page page = new Page(style, anyUndetermined(files));
-    files.forEach(f -> page.row(f.outcome(), Visible.cut(Visible.of(f.file()), page.room())));
+    files.forEach(f -> page.row(f.outcome(), Visible.of(f.file())));
     return page.toString();
   }
 
@@ -63,15 +67,18 @@ public final class CheckText {
     return errors == 1 ? "1 error" : errors + " errors";
   }
 
-  /** {@code 3 of 8 judgements broken}. */
+  /** {@code 8 judgements: 3 broken, 5 kept}. */
   static String tally(NetworkJudgement judgement) {
     List<Verdict> verdicts =
         judgement.cases().stream()
             .flatMap(c -> c.limits().stream())
             .map(LimitJudgement::verdict)
             .toList();
-    String all = verdicts.size() == 1 ? "1 judgement: " : verdicts.size() + " judgements: ";
-    return all + counts(verdicts.stream().map(Outcome::of));
+    String all = verdicts.size() == 1 ? "1 judgement" : verdicts.size() + " judgements";
+    if (verdicts.stream().distinct().count() == 1) {
+      return all + (verdicts.size() == 1 ? ", " : ", all ") + verdicts.get(0).word();
+    }
+    return all + ": " + counts(verdicts.stream().map(Outcome::of));
   }
 
   /** {@code 1 invalid, 2 broken, 3 kept}: the gravest first. */

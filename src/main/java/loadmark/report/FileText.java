@@ -18,11 +18,13 @@ import loadmark.study.Outcome;
 /** One judged file: the verdict, all judgements at a glance, then each with what it rests on. */
 final class FileText {
   private final FileResult.Judged file;
+  private final List<String> options;
   private final NetworkJudgement judgement;
   private final Page page;
 
-  FileText(FileResult.Judged file, Style style) {
+  FileText(FileResult.Judged file, List<String> options, Style style) {
     this.file = file;
+    this.options = options;
     this.judgement = file.judgement();
     this.page = new Page(style, hasUndetermined());
   }
@@ -41,6 +43,9 @@ final class FileText {
     }
     page.paragraph(
         CheckText.tally(judgement) + network.sweep().map(s -> ", " + sweep(s)).orElse(""));
+    if (!options.isEmpty()) {
+      page.paragraph("judged with " + Visible.of(String.join(", ", options)));
+    }
     writeMethod();
     long judgements = judgement.cases().stream().mapToLong(c -> c.limits().size()).sum();
     if (judgements > 1) {

@@ -15,6 +15,8 @@ import loadmark.network.Port;
 
 /** The only port and the only case that are of interest, where the user named one. */
 record Selection(Optional<String> port, Optional<String> caseName) {
+  /** A hint lists no more names than these. */
+  private static final int MOST_NAMES = 8;
 
   boolean wants(Port one) {
     return port.isEmpty() || port.get().equals(one.name());
@@ -45,12 +47,15 @@ record Selection(Optional<String> port, Optional<String> caseName) {
     }
     String hint =
         Nearest.find(chosen.get(), names)
-            .map(n -> "did you mean --" + kind + " " + n + "?")
-            .orElse("it has: " + String.join(", ", names));
+            .map(n -> "did you mean `--" + kind + " " + n + "`?")
+            .orElse(
+                "it has "
+                    + String.join(", ", names.subList(0, Math.min(MOST_NAMES, names.size())))
+                    + (names.size() > MOST_NAMES ? ", …" : ""));
     findings.error(
         "unknown-" + kind,
         source.whole(),
-        "this file has no " + kind + " '" + chosen.get() + "', which --" + kind + " asks for",
+        "this file has no " + kind + " `" + chosen.get() + "`, which --" + kind + " asks for",
         hint);
   }
 

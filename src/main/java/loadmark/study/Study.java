@@ -69,15 +69,13 @@ public final class Study {
         continue;
       }
       String name = set.substring(0, equals).strip();
-      // Blanks in place of the name keep the columns of findings right.
-      SourceText value =
-          new SourceText("--set", " ".repeat(equals + 1) + set.substring(equals + 1));
+      SourceText value = new SourceText("--set " + name, set.substring(equals + 1).strip());
       NetworkReader.readExpression(value, findings)
           .filter(expression -> lets.putIfAbsent(name, expression) != null)
           .ifPresent(
               twice ->
                   findings.error(
-                      "set-twice", source.whole(), "--set gives '" + name + "' two values"));
+                      "set-twice", source.whole(), "--set gives `" + name + "` two values"));
     }
     return lets;
   }
@@ -119,9 +117,19 @@ public final class Study {
           "no-frequencies",
           source.text().whole(),
           "a curve needs frequencies: this file has no sweep",
-          "add a line such as 'sweep 10 Hz to 1 MHz', or use --sweep or --at");
+          "add a line such as `sweep 10 Hz to 1 MHz`, or use --sweep or --at");
     }
-    return findings.hasErrors() ? Optional.empty() : Optional.of(draw(network, hz.orElseThrow()));
+    if (findings.hasErrors()) {
+      return Optional.empty();
+    }
+    CurveTable table = draw(network, hz.orElseThrow());
+    if (table.countUndetermined() > 0) {
+      findings.warning(
+          "undetermined",
+          source.text().whole(),
+          "impedances that could not be determined: " + table.countUndetermined());
+    }
+    return Optional.of(table);
   }
 
   private CurveTable draw(Network network, double[] hz) {

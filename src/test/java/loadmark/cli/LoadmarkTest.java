@@ -63,7 +63,7 @@ class LoadmarkTest {
     Run run = runWith(BROKEN, "check", "-");
     assertThat(run.err()).isEmpty();
     assertThat(run.out())
-        .startsWith("BROKEN   -\n         Stand-in\n         1 judgement: 1 broken")
+        .startsWith("BROKEN   -\n         Stand-in\n         1 judgement, broken")
         .contains("BROKEN     line 7    limit change 2 %\n")
         .contains("worst     change 10.00 % at 10 Hz; allowed: at most 2 %\n")
         .contains("without   100.0 Ω ∠ 0°    100.0 Ω + j0 Ω\n")
@@ -122,9 +122,9 @@ class LoadmarkTest {
   @CsvSource(
       delimiter = '|',
       value = {
-        "chekc a.zin | 1:10 | there is no command 'chekc' | did you mean check?",
-        "check --fromat json a.zin | 1:16 | check has no option --fromat | did you mean --format?",
-        "check --format jsno a.zin | 1:16 | there is no format 'jsno' | did you mean json?",
+        "chekc a.zin | 1:10 | there is no command `chekc` | did you mean `check`?",
+        "check --fromat json a.zin | 1:16 | check has no option --fromat | did you mean `--format`?",
+        "check --format jsno a.zin | 1:16 | there is no format `jsno` | did you mean `json`?",
         "check --at 3 a.zin | 1:16 | check has no option --at | --at belongs to curve",
         "check | 1:10 | check needs a FILE | a network file, or - for standard input",
         "check a.zin --port | 1:22 | --port needs a value | ",
@@ -154,7 +154,7 @@ class LoadmarkTest {
     assertThat(root.path("files")).isEmpty();
     assertThat(root.path("diagnostics").path(0).path("code").asText()).isEqualTo("unknown-option");
     assertThat(root.path("diagnostics").path(0).path("hint").asText())
-        .isEqualTo("did you mean --port?");
+        .isEqualTo("did you mean `--port`?");
     assertThat(run.err()).contains("check has no option --prot");
     assertThat(run.status()).isEqualTo(2);
   }
@@ -164,8 +164,8 @@ class LoadmarkTest {
     Run run = runWith(BROKEN, "check", "--port", "inptu", "-");
     assertThat(run.out()).isEmpty();
     assertThat(run.err())
-        .startsWith("-:1:1: error: this file has no port 'inptu', which --port asks for\n")
-        .contains("did you mean --port input?");
+        .startsWith("-:1:1: error: this file has no port `inptu`, which --port asks for\n")
+        .contains("did you mean `--port input`?");
     assertThat(run.status()).isEqualTo(2);
   }
 

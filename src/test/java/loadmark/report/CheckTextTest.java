@@ -33,7 +33,7 @@ class CheckTextTest {
 
   @Test
   void reportGoesFromTheVerdictToWhatItRestsOn() {
-    assertThat(CheckText.write(List.of(Samples.packTap()), Style.PLAIN))
+    assertThat(CheckText.write(List.of(Samples.packTap()), List.of(), Style.PLAIN))
         .isEqualTo(
             """
             BROKEN   pack-tap.zin
@@ -109,7 +109,8 @@ class CheckTextTest {
             Samples.judged(
                 one, Samples.port("input"), Samples.kept(limit, Samples.worst(1e3, 0.01))));
     FileResult invalid = new FileResult.Invalid("slip.zin", Optional.empty(), List.of(error()));
-    String text = CheckText.write(List.of(kept, Samples.packTap(), invalid), Style.PLAIN);
+    String text =
+        CheckText.write(List.of(kept, Samples.packTap(), invalid), List.of(), Style.PLAIN);
     assertThat(text)
         .startsWith("kept     kept.zin\n")
         .endsWith(
@@ -118,7 +119,7 @@ class CheckTextTest {
                      3 files: 1 invalid, 1 broken, 1 kept
             INVALID  slip.zin      1 error
             BROKEN   pack-tap.zin  5 judgements: 2 broken, 3 kept
-            kept     kept.zin      1 judgement: 1 kept
+            kept     kept.zin      1 judgement, kept
             """);
     assertThat(CheckText.writeVerdicts(List.of(kept, invalid), Style.PLAIN))
         .isEqualTo("kept     kept.zin\nINVALID  slip.zin\n");
@@ -127,6 +128,14 @@ class CheckTextTest {
   private static Finding error() {
     return new Finding(
         Severity.ERROR, "slip", new SourceText("slip.zin", "").whole(), "slip", Optional.empty());
+  }
+
+  @Test
+  void optionsThatBentTheFileAreTold() {
+    assertThat(
+            CheckText.write(
+                List.of(Samples.packTap()), List.of("--set trim=12 pF", "--case all"), Style.PLAIN))
+        .contains("\n         judged with --set trim=12 pF, --case all\n");
   }
 
   @Test
@@ -151,6 +160,7 @@ class CheckTextTest {
                     List.of(Samples.port("input")),
                     List.of(),
                     Samples.judged(one, Samples.port("input"), unknown))),
+            List.of(),
             Style.PLAIN);
     assertThat(text)
         .contains("UNDETERMINED    line 3    limit change 2 %\n")
@@ -176,6 +186,7 @@ class CheckTextTest {
                         one,
                         Samples.port("input"),
                         Samples.broken(limit, unbounded, new BrokenBand(Band.DC, unbounded))))),
+            List.of(),
             Style.PLAIN);
     assertThat(text)
         .contains("worst     change without bound at DC; allowed: at most 2 %\n")
@@ -186,11 +197,12 @@ class CheckTextTest {
 
   @Test
   void colourIsThereOnlyWhenAskedFor() {
-    assertThat(CheckText.write(List.of(Samples.packTap()), Style.PLAIN)).doesNotContain(ESCAPE);
-    String coloured = CheckText.write(List.of(Samples.packTap()), Style.COLOUR);
+    assertThat(CheckText.write(List.of(Samples.packTap()), List.of(), Style.PLAIN))
+        .doesNotContain(ESCAPE);
+    String coloured = CheckText.write(List.of(Samples.packTap()), List.of(), Style.COLOUR);
     assertThat(coloured).contains(ESCAPE + "[1;31mBROKEN");
     assertThat(coloured.replaceAll(ESCAPE + "\\[[0-9;]*m", ""))
-        .isEqualTo(CheckText.write(List.of(Samples.packTap()), Style.PLAIN));
+        .isEqualTo(CheckText.write(List.of(Samples.packTap()), List.of(), Style.PLAIN));
   }
 
   @Test
@@ -198,7 +210,9 @@ class CheckTextTest {
     long seed = 4711;
     Random random = new Random(seed);
     for (int i = 0; i < 300; i++) {
-      String text = CheckText.write(List.of(generated(random)), Style.PLAIN);
+      String text =
+          CheckText.write(
+              List.of(generated(random)), List.of("--set " + name(random)), Style.PLAIN);
       assertThat(text).as("seed %d, round %d", seed, i).doesNotContain(ESCAPE, "\u202E", "\r");
       assertThat(text.lines())
           .as("seed %d, round %d", seed, i)
@@ -218,7 +232,7 @@ class CheckTextTest {
       Case one = new Case(name(random), List.of(first, second), List.of(second), 0);
       Limit limit =
           Samples.limit(
-              Criterion.values()[random.nextInt(Criterion.values().length)],
+              List.of(Criterion.values()).get(random.nextInt(Criterion.values().length)),
               Bound.between(random.nextDouble() * 1e-9, 1e9 + random.nextDouble()),
               1 + random.nextInt(99999),
               "limit " + name(random) + " " + name(random));
