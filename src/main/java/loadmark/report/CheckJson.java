@@ -18,6 +18,7 @@ import loadmark.network.Limit;
 import loadmark.network.Load;
 import loadmark.network.OnePort;
 import loadmark.network.Sweep;
+import loadmark.quantity.Engineering;
 import loadmark.study.FileResult;
 
 /** Checked files as {@code loadmark/check/1}. */
@@ -86,8 +87,8 @@ public final class CheckJson {
   }
 
   private static void writeBand(JsonGenerator json, Band band) throws IOException {
-    json.writeNumberField("from_hz", band.fromHz());
-    json.writeNumberField("to_hz", band.toHz());
+    Json.writeNumber(json, "from_hz", band.fromHz());
+    Json.writeNumber(json, "to_hz", band.toHz());
   }
 
   private static void writeCase(JsonGenerator json, CaseJudgement one) throws IOException {
@@ -129,10 +130,10 @@ public final class CheckJson {
     if (judged.worst().isPresent()) {
       Worst worst = judged.worst().get();
       json.writeObjectFieldStart("worst");
-      json.writeNumberField("hz", worst.hz());
+      Json.writeNumber(json, "hz", worst.hz());
       writeValue(json, "value", limit, worst);
       if (worst.valueOhm().isPresent()) {
-        json.writeNumberField("value_ohm", worst.valueOhm().getAsDouble());
+        Json.writeNumber(json, "value_ohm", worst.valueOhm().getAsDouble());
       }
       Json.writeOhms(json, "without", worst.without());
       Json.writeOhms(json, "with", worst.with());
@@ -142,7 +143,7 @@ public final class CheckJson {
     for (BrokenBand band : judged.bands()) {
       json.writeStartObject();
       writeBand(json, band.band());
-      json.writeNumberField("worst_hz", band.worst().hz());
+      Json.writeNumber(json, "worst_hz", band.worst().hz());
       writeValue(json, "worst", limit, band.worst());
       json.writeEndObject();
     }
@@ -165,7 +166,7 @@ public final class CheckJson {
   private static void writeIfPresent(JsonGenerator json, String name, OptionalDouble value)
       throws IOException {
     if (value.isPresent()) {
-      json.writeNumberField(name, value.getAsDouble());
+      Json.writeNumber(json, name, value.getAsDouble());
     }
   }
 
@@ -175,7 +176,7 @@ public final class CheckJson {
     }
     if (limit.reference().get() instanceof OnePort.Element element
         && element.kind() == OnePort.ElementKind.RESISTANCE) {
-      json.writeNumberField("reference_ohm", element.value().nominal());
+      Json.writeNumber(json, "reference_ohm", element.value().nominal());
     } else {
       json.writeStringField("reference", limit.referenceText());
     }
@@ -186,8 +187,8 @@ public final class CheckJson {
     List<Band> stretches = scope.stream().filter(b -> !b.isPoint()).toList();
     List<Band> points = scope.stream().filter(Band::isPoint).toList();
     List<Band> ends = stretches.isEmpty() ? points : stretches;
-    json.writeNumberField("from_hz", ends.get(0).fromHz());
-    json.writeNumberField("to_hz", ends.get(ends.size() - 1).toHz());
+    Json.writeNumber(json, "from_hz", ends.get(0).fromHz());
+    Json.writeNumber(json, "to_hz", ends.get(ends.size() - 1).toHz());
     boolean dcBesideBand = !stretches.isEmpty() && points.contains(Band.DC);
     if (dcBesideBand) {
       json.writeBooleanField("dc", true);
@@ -196,7 +197,7 @@ public final class CheckJson {
     if (!listed.isEmpty()) {
       json.writeArrayFieldStart("at_hz");
       for (Band point : listed) {
-        json.writeNumber(point.fromHz());
+        json.writeNumber(Engineering.exact(point.fromHz()));
       }
       json.writeEndArray();
     }
@@ -215,7 +216,7 @@ public final class CheckJson {
       throws IOException {
     OptionalDouble value = Unit.inOhmAlone(limit) ? worst.valueOhm() : worst.value();
     if (value.isPresent()) {
-      json.writeNumberField(name, value.getAsDouble());
+      Json.writeNumber(json, name, value.getAsDouble());
     } else {
       json.writeNullField(name);
       json.writeBooleanField("unbounded", true);
@@ -229,7 +230,7 @@ public final class CheckJson {
     json.writeStringField("verdict", blame.verdict().word());
     if (blame.worst().isPresent()) {
       writeValue(json, "worst", firstBroken(one), blame.worst().get());
-      json.writeNumberField("worst_hz", blame.worst().get().hz());
+      Json.writeNumber(json, "worst_hz", blame.worst().get().hz());
     }
     json.writeEndObject();
   }

@@ -1,9 +1,9 @@
 package loadmark.report;
 
-import com.fasterxml.jackson.core.io.NumberOutput;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import loadmark.quantity.Engineering;
 
 /** Rows of comma-separated values (RFC 4180, but for lines ended by a line feed). */
 final class Csv {
@@ -34,10 +34,7 @@ final class Csv {
     if (Double.isNaN(value)) {
       return word("");
     }
-    return word(
-        Double.isInfinite(value)
-            ? (value > 0 ? "inf" : "-inf")
-            : NumberOutput.toString(value, true));
+    return word(Double.isInfinite(value) ? (value > 0 ? "inf" : "-inf") : Engineering.exact(value));
   }
 
   Csv number(OptionalDouble value) {

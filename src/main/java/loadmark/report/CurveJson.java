@@ -5,6 +5,7 @@ import java.io.IOException;
 import java.util.List;
 import java.util.Optional;
 import loadmark.diagnostic.Finding;
+import loadmark.quantity.Engineering;
 import loadmark.response.Loading;
 import loadmark.study.CurveTable;
 
@@ -66,7 +67,7 @@ public final class CurveJson {
     } else if (Double.isInfinite(value)) {
       json.writeString(value > 0 ? "inf" : "-inf");
     } else {
-      json.writeNumber(value);
+      json.writeNumber(Engineering.exact(value));
     }
   }
 }

@@ -2,7 +2,6 @@ package loadmark.report;
 
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
-import com.fasterxml.jackson.core.StreamWriteFeature;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
 import com.fasterxml.jackson.core.util.Separators;
@@ -13,12 +12,12 @@ import java.util.List;
 import java.util.Optional;
 import loadmark.diagnostic.Finding;
 import loadmark.diagnostic.FindingPrinter;
+import loadmark.quantity.Engineering;
 import loadmark.response.Ohms;
 
 /** What every JSON report is made of. */
 final class Json {
-  private static final JsonFactory FACTORY =
-      JsonFactory.builder().enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER).build();
+  private static final JsonFactory FACTORY = new JsonFactory();
 
   private Json() {}
 
@@ -97,6 +96,12 @@ final class Json {
     json.writeEndArray();
   }
 
+  /** The shortest decimal that reads back the same double; {@code value} is finite. */
+  static void writeNumber(JsonGenerator json, String name, double value) throws IOException {
+    json.writeFieldName(name);
+    json.writeNumber(Engineering.exact(value));
+  }
+
   static void writeOhms(JsonGenerator json, String name, Ohms z) throws IOException {
     switch (z.state()) {
       case UNDETERMINED -> json.writeNullField(name);
@@ -107,8 +112,8 @@ final class Json {
       }
       case FINITE -> {
         json.writeObjectFieldStart(name);
-        json.writeNumberField("re", z.re());
-        json.writeNumberField("im", z.im());
+        writeNumber(json, "re", z.re());
+        writeNumber(json, "im", z.im());
         json.writeEndObject();
       }
     }

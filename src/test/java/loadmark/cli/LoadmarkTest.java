@@ -184,11 +184,7 @@ class LoadmarkTest {
     assertThat(
             run.out().lines().map(l -> l.split(",", -1)).map(c -> c[1] + " " + c[2] + " " + c[3]))
         .containsExactly(
-            "case hz re_ohm",
-            "bare 1000.0 100.0",
-            "bare 2000.0 100.0",
-            "meter 1000.0 90.0",
-            "meter 2000.0 90.0");
+            "case hz re_ohm", "bare 1000 100", "bare 2000 100", "meter 1000 90", "meter 2000 90");
     assertThat(run.status()).isZero();
   }
 

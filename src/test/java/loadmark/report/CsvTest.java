@@ -42,7 +42,7 @@ class CsvTest {
         .isEqualTo(
             """
             file,port,case,limit,line,from_hz,to_hz,verdict,worst_hz,worst,bands
-            a.zin,input,'+probe,change,3,10.0,1000000.0,kept,1000.0,0.015,0
+            a.zin,input,'+probe,change,3,10,1e6,kept,1000,0.015,0
             """);
   }
 }

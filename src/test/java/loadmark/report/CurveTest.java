@@ -72,13 +72,11 @@ class CurveTest {
     assertThat(rows)
         .startsWith(
             "port,case,hz,re_ohm,im_ohm,magnitude_ohm,phase_deg,parallel_ohm,parallel_f,change",
-            "input,bare,0.0,,,inf,,inf,,0.0",
-            "input,bare,1000.0,,,,,,,",
-            "input,probe,0.0,,,inf,,inf,,inf");
+            "input,bare,0,,,inf,,inf,,0",
+            "input,bare,1000,,,,,,,",
+            "input,probe,0,,,inf,,inf,,inf");
     // Pythagoras: 3, 4, 5; 1/Re(1/Z) = 25/4.
-    assertThat(rows[4])
-        .startsWith("input,probe,1000.0,4.0,-3.0,5.0,-36.8698976458")
-        .endsWith(",0.5");
+    assertThat(rows[4]).startsWith("input,probe,1000,4,-3,5,-36.8698976458").endsWith(",0.5");
     assertThat(rows[4].split(",", -1)[7]).isEqualTo("6.25");
   }
 
@@ -107,9 +105,9 @@ class CurveTest {
             "parallel_ohm",
             "parallel_f",
             "change");
-    assertThat(probe.path("magnitude_ohm").toString()).isEqualTo("[\"inf\",5.0]");
-    assertThat(probe.path("re_ohm").toString()).isEqualTo("[null,4.0]");
-    assertThat(root.path("curves").path(0).path("change").toString()).isEqualTo("[0.0,null]");
+    assertThat(probe.path("magnitude_ohm").toString()).isEqualTo("[\"inf\",5]");
+    assertThat(probe.path("re_ohm").toString()).isEqualTo("[null,4]");
+    assertThat(root.path("curves").path(0).path("change").toString()).isEqualTo("[0,null]");
   }
 
   @Test
