@@ -31,6 +31,11 @@ final class Arithmetic {
     }
     double a = left.value();
     double b = right.value();
+    if (operation.operator() == Expression.Operator.DIVIDED && b == 0) {
+      findings.error(
+          "arithmetic", operation.right().span(), "this is zero: nothing is divided by it");
+      return Optional.empty();
+    }
     return switch (operation.operator()) {
       case TIMES -> of(a * b, left.dimension().times(right.dimension()));
       case DIVIDED -> of(a / b, left.dimension().over(right.dimension()));

@@ -17,6 +17,7 @@ import loadmark.network.Port;
 import loadmark.network.Supply;
 import loadmark.network.Sweep;
 import loadmark.syntax.Expression;
+import loadmark.syntax.ExpressionText;
 import loadmark.syntax.NetworkFile;
 import loadmark.syntax.Statement;
 
@@ -80,11 +81,11 @@ public final class Binder {
     values.readAll();
     Wiring wiring = new Wiring(declared, nodes, findings);
     wiring.read(statements);
+    new UnknownNodes(statements, declared, wiring, nodes).report(findings);
     List<Part> parts = readParts(wiring);
     List<Supply> supplies = readSupplies();
     Map<String, Port> ports = readPorts();
     Map<String, Load> loads = readLoads();
-    new UnknownNodes(statements, declared).report(findings);
     checkTopology(wiring, parts, supplies, ports, loads);
 
     Map<String, Case> cases = new Cases(declared, loads, findings).read(statements);
@@ -146,7 +147,7 @@ public final class Binder {
                 place.first(),
                 place.second(),
                 value.value(),
-                Texts.of(line.value().span()),
+                ExpressionText.of(line.value()),
                 value.rated(),
                 line.span().line()));
       }
@@ -243,7 +244,7 @@ public final class Binder {
               nodes.mention(line.nodes().plus()),
               nodes.mention(line.nodes().minus()),
               value,
-              Texts.of(line.value().span()),
+              ExpressionText.of(line.value()),
               line.span().line()));
     }
     return loads;

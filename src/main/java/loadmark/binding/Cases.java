@@ -85,6 +85,7 @@ final class Cases {
   private void add(Name place, String name, List<Load> on, List<Load> against) {
     if (Declarations.isTaken(name)) {
       Declarations.reportTaken(findings, place);
+      incomplete = true;
       return;
     }
     Name earlier = lines.putIfAbsent(name, place);

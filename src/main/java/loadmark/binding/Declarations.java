@@ -25,6 +25,8 @@ final class Declarations {
   private final Set<String> nodes = new HashSet<>();
   private final Set<String> doubtful = new HashSet<>();
   private final Set<String> brokenWords = new HashSet<>();
+  private boolean namelessPart;
+  private boolean loadLine;
 
   static Declarations of(List<Statement> statements, Findings findings) {
     Declarations all = new Declarations();
@@ -36,6 +38,7 @@ final class Declarations {
           all.parts.put(part.name().text(), part);
         }
       } else if (statement instanceof Statement.Load load) {
+        all.loadLine = true;
         if (all.isNew(load.name(), hung, "part or load", findings)) {
           all.loads.put(load.name().text(), load);
         }
@@ -51,11 +54,21 @@ final class Declarations {
         }
       } else if (statement instanceof Statement.Broken broken) {
         all.brokenWords.add(broken.word());
+        all.namelessPart |= broken.declared().isEmpty() && isPartWord(broken.word());
         broken.declared().ifPresent(name -> all.doubtful.add(name.text()));
         broken.mentioned().forEach(name -> all.doubtful.add(name.text()));
       }
     }
     return all;
+  }
+
+  private static boolean isPartWord(String word) {
+    for (Statement.PartKind kind : Statement.PartKind.values()) {
+      if (kind.word().equals(word)) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private void note(Statement.NodePair pair) {
@@ -72,6 +85,7 @@ final class Declarations {
     Name earlier = space.putIfAbsent(name.text(), name);
     if (earlier != null) {
       reportDuplicate(findings, name, earlier, what);
+      doubtful.add(name.text());
       return false;
     }
     return true;
@@ -113,6 +127,16 @@ final class Declarations {
   /** Whether a statement that could not be read declares or mentions this name. */
   boolean isDoubtful(String name) {
     return doubtful.contains(name);
+  }
+
+  /** Whether the file has a load's line, were its name taken. */
+  boolean hasLoadLine() {
+    return loadLine;
+  }
+
+  /** Whether a part's statement could not be read so far as its name: any part may be that one. */
+  boolean hasNamelessPart() {
+    return namelessPart;
   }
 
   /** Whether a statement that begins with this word could not be read; the empty word is any. */

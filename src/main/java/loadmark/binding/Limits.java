@@ -10,6 +10,7 @@ import loadmark.network.Band;
 import loadmark.network.Case;
 import loadmark.network.Limit;
 import loadmark.network.Port;
+import loadmark.syntax.ExpressionText;
 import loadmark.syntax.Name;
 import loadmark.syntax.Statement;
 import loadmark.syntax.Statement.ScopeItem;
@@ -62,19 +63,18 @@ final class Limits {
     if (scope.isEmpty() || chosenCases.isEmpty() || chosenPorts.isEmpty()) {
       return;
     }
-    String text = Texts.statement(line.span());
     for (Criteria.Bounded one : bounded) {
       limits.add(
           new Limit(
               one.criterion(),
               one.bound(),
               one.reference().map(Criteria.Reference::value),
-              one.reference().map(r -> Texts.of(r.written().span())).orElse(""),
+              one.reference().map(r -> ExpressionText.of(r.written())).orElse(""),
               scope.get(),
               chosenCases,
               chosenPorts,
               line.span().line(),
-              text));
+              line.text()));
     }
   }
 
@@ -114,7 +114,7 @@ final class Limits {
     if (absolute) {
       return List.of(bare);
     }
-    if (declared.loads().isEmpty() && !declared.isBroken("load") && !declared.isBroken("case")) {
+    if (!declared.hasLoadLine() && !declared.isBroken("load") && !declared.isBroken("case")) {
       findings.error(
           "no-load",
           line.span(),

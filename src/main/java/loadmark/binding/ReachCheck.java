@@ -28,6 +28,23 @@ final class ReachCheck implements Check {
     if (judged.isEmpty()) {
       return;
     }
+    Connections all = Connections.of(draft, Optional.empty());
+    for (Port port : draft.ports()) {
+      boolean apart = !all.reach(port.plus()).contains(port.minus());
+      if (apart && all.count(port.plus()) > 0 && all.count(port.minus()) > 0) {
+        findings.error(
+            "no-path",
+            draft.lineOf(port).nodes().span(),
+            "nothing leads from `"
+                + port.plus().name()
+                + "` to `"
+                + port.minus().name()
+                + "`: the port `"
+                + port.name()
+                + "` is open, whatever hangs on it",
+            "one of the two is another node, or a wire is missing");
+      }
+    }
     for (Load load : draft.loads()) {
       Connections others = Connections.of(draft, Optional.of(load));
       for (Node node : new Node[] {load.first(), load.second()}) {

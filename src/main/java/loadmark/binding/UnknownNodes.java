@@ -1,5 +1,6 @@
 package loadmark.binding;
 
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
@@ -7,45 +8,63 @@ import java.util.Map;
 import java.util.Set;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.Nearest;
+import loadmark.network.Node;
 import loadmark.syntax.Name;
 import loadmark.syntax.Statement;
 
 /**
- * Finds the nodes that a port or a load names and nothing else does: most often a slip of the pen.
+ * Finds the nodes of ports and loads to which no wire and no supply leads, nor a series load from
+ * elsewhere: most often a slip of the pen.
  */
 final class UnknownNodes {
   private final Declarations declared;
+  private final Set<String> known = new HashSet<>();
   private final Map<String, Integer> mentions = new HashMap<>();
-  private final Set<String> wired = new HashSet<>();
+  private final Set<String> inSeries = new HashSet<>();
+  private final List<Name> supplied = new ArrayList<>();
+  private boolean anyWire;
 
-  UnknownNodes(List<Statement> statements, Declarations declared) {
+  /**
+   * @param nodes those that the wires name, and no others yet
+   */
+  UnknownNodes(List<Statement> statements, Declarations declared, Wiring wiring, Nodes nodes) {
     this.declared = declared;
+    for (Node node : nodes.all()) {
+      known.add(node.name());
+    }
     for (Statement statement : statements) {
       if (statement instanceof Statement.Wire wire) {
-        // Part or node: where a chain is off its turn, either may stand anywhere in it.
-        for (Statement.WireItem item : wire.items()) {
-          count(item.name());
-          wired.add(item.name().text());
+        anyWire = true;
+        if (wiring.isDoubtful()) {
+          // A chain that could not be followed may hold any of its names as a node.
+          wire.items().forEach(item -> known.add(item.name().text()));
         }
       } else if (statement instanceof Statement.Supply supply) {
-        count(supply.node());
-        wired.add(supply.node().text());
+        supplied.add(supply.node());
       } else if (statement instanceof Statement.Port port) {
-        count(port.nodes().plus());
-        count(port.nodes().minus());
+        count(port.nodes());
       } else if (statement instanceof Statement.Load load) {
-        count(load.nodes().plus());
-        count(load.nodes().minus());
+        count(load.nodes());
+        if (load.placement() == Statement.Placement.SERIES) {
+          inSeries.add(load.nodes().plus().text());
+          inSeries.add(load.nodes().minus().text());
+        }
       }
     }
-    wired.removeAll(declared.parts().keySet());
   }
 
-  private void count(Name node) {
-    mentions.merge(node.text(), 1, Integer::sum);
+  private void count(Statement.NodePair pair) {
+    mentions.merge(pair.plus().text(), 1, Integer::sum);
+    mentions.merge(pair.minus().text(), 1, Integer::sum);
   }
 
   void report(Findings findings) {
+    if (!anyWire) {
+      return;
+    }
+    for (Name node : supplied) {
+      report(findings, "the supply", node);
+    }
     for (Statement.Port port : declared.ports().values()) {
       report(findings, "port", port.name(), port.nodes());
     }
@@ -55,24 +74,28 @@ final class UnknownNodes {
   }
 
   private void report(Findings findings, String what, Name owner, Statement.NodePair pair) {
-    for (Name node : List.of(pair.plus(), pair.minus())) {
-      if (mentions.getOrDefault(node.text(), 0) == 1
-          && !node.text().equals(Declarations.GROUND)
-          && !declared.isDoubtful(node.text())) {
-        findings.error(
-            "no-path",
-            node.span(),
-            "the node `"
-                + node.text()
-                + "` of the "
-                + what
-                + " `"
-                + owner.text()
-                + "` has no path to the rest of the network",
-            Nearest.find(node.text(), wired)
-                .map(near -> "did you mean `" + near + "`?")
-                .orElse("no wire leads to it"));
-      }
+    String whose = "the " + what + " `" + owner.text() + "`";
+    report(findings, whose, pair.plus());
+    report(findings, whose, pair.minus());
+  }
+
+  private void report(Findings findings, String whose, Name node) {
+    if (!isKnown(node.text())) {
+      findings.error(
+          "no-path",
+          node.span(),
+          "the node `" + node.text() + "` of " + whose + " has no path to the rest of the network",
+          Nearest.find(node.text(), known)
+              .map(near -> "did you mean `" + near + "`?")
+              .orElse(
+                  declared.parts().containsKey(node.text())
+                      ? "`" + node.text() + "` is a part; name one of its nodes"
+                      : "no wire leads to it"));
     }
+  }
+
+  private boolean isKnown(String node) {
+    boolean betweenLoads = inSeries.contains(node) && mentions.getOrDefault(node, 0) > 1;
+    return known.contains(node) || betweenLoads || declared.isDoubtful(node);
   }
 }

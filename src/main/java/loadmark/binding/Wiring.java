@@ -184,7 +184,9 @@ final class Wiring {
           "a part stands between two different nodes");
     }
     Place earlier = places.putIfAbsent(name, new Place(before, after, item.span()));
-    if (earlier != null) {
+    if (earlier != null && declared.isDoubtful(name)) {
+      doubtful = true;
+    } else if (earlier != null) {
       findings.error(
           "wired-twice",
           item.span(),
@@ -197,7 +199,7 @@ final class Wiring {
   /** Reports a name that is no part; the part that was most likely meant, if any. */
   private Optional<String> reportUndeclared(WireItem item) {
     String name = item.name().text();
-    if (declared.isDoubtful(name)) {
+    if (declared.isDoubtful(name) || declared.hasNamelessPart()) {
       doubtful = true;
       return Optional.empty();
     }

@@ -64,7 +64,7 @@ final class ExpressionBuilder extends NetworkBaseVisitor<Expression> {
       return new Expression.Reference(name, places.of(c));
     }
     List<Expression.Argument> arguments = c.argument().stream().map(this::argument).toList();
-    boolean block = arguments.isEmpty() || arguments.stream().anyMatch(a -> a.name().isPresent());
+    boolean block = arguments.stream().anyMatch(a -> a.name().isPresent());
     if (block) {
       findings.error(
           "not-known-yet",

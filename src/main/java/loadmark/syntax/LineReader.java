@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import loadmark.diagnostic.Findings;
-import loadmark.diagnostic.Span;
 import loadmark.syntax.antlr.NetworkParser;
 import org.antlr.v4.runtime.Token;
 
@@ -33,7 +32,6 @@ final class LineReader {
   }
 
   Statement read(List<Token> line) {
-    Span span = places.firstLine(line);
     if (!check.beginsKnownStatement(line) || !check.passes(line)) {
       return broken(line);
     }
@@ -43,7 +41,7 @@ final class LineReader {
     Optional<Statement> built =
         outcome
             .read()
-            .map(tree -> new StatementBuilder(places, span, findings).visit(tree.statement()));
+            .map(tree -> new StatementBuilder(places, line, findings).visit(tree.statement()));
     return findings.errorCount() > before ? broken(line) : built.orElseGet(() -> broken(line));
   }
 
@@ -56,10 +54,7 @@ final class LineReader {
   Optional<Statement.Sweep> readSweep(List<Token> tokens) {
     int before = findings.errorCount();
     return read(tokens, NetworkParser::sweepOption)
-        .map(
-            tree ->
-                new StatementBuilder(places, places.firstLine(tokens), findings)
-                    .sweep(tree.sweep()))
+        .map(tree -> new StatementBuilder(places, tokens, findings).sweep(tree.sweep()))
         .filter(sweep -> findings.errorCount() == before);
   }
 
@@ -81,6 +76,19 @@ final class LineReader {
     return outcome.read();
   }
 
+  /** Tokens that stand together: `3V3`, `+5V`, perhaps a name that wants quotes. */
+  private Optional<Name> findRun(List<Token> line, int from) {
+    int last = from;
+    StringBuilder text = new StringBuilder(line.get(from).getText());
+    while (last + 1 < line.size() && Places.adjoin(line.get(last), line.get(last + 1))) {
+      last++;
+      text.append(line.get(last).getText());
+    }
+    return last == from
+        ? Optional.empty()
+        : Optional.of(new Name(text.toString(), false, places.of(line.get(from), line.get(last))));
+  }
+
   /** What can be told about a line that is not read. */
   Statement.Broken broken(List<Token> line) {
     NameReader names = new NameReader(places);
@@ -91,10 +99,8 @@ final class LineReader {
       boolean unit = before.getType() == NetworkParser.NUMBER;
       if (Words.isName(token) && !unit) {
         mentioned.add(names.read(token));
-      } else if (unit && Places.adjoin(before, token)) {
-        // `3V3`: perhaps a name that wants quotes.
-        mentioned.add(
-            new Name(before.getText() + token.getText(), false, places.of(before, token)));
+      } else if (!Places.adjoin(before, token)) {
+        findRun(line, i).ifPresent(mentioned::add);
       }
     }
     String word = line.get(0).getText();

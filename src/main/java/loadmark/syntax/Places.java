@@ -5,6 +5,7 @@ import loadmark.diagnostic.SourceText;
 import loadmark.diagnostic.Span;
 import org.antlr.v4.runtime.ParserRuleContext;
 import org.antlr.v4.runtime.Token;
+import org.antlr.v4.runtime.misc.Interval;
 
 /** Where tokens stand in a source. Their lines and columns were set by {@link TokenReader}. */
 record Places(SourceText source) {
@@ -37,6 +38,27 @@ record Places(SourceText source) {
   /** The empty place behind a token. */
   Span after(Token token) {
     return new Span(source, token.getLine(), column(token) + length(token), 0);
+  }
+
+  /**
+   * The text of some tokens as it stands, with line ends and comments between them made a blank.
+   */
+  static String text(List<Token> tokens) {
+    StringBuilder text = new StringBuilder();
+    Token before = tokens.get(0);
+    for (Token token : tokens) {
+      if (token != before) {
+        int from = before.getStopIndex() + 1;
+        int to = token.getStartIndex() - 1;
+        boolean sameLine = token.getLine() == before.getLine();
+        boolean apart = from <= to;
+        text.append(
+            !apart ? "" : sameLine ? token.getInputStream().getText(Interval.of(from, to)) : " ");
+      }
+      text.append(token.getText());
+      before = token;
+    }
+    return text.toString();
   }
 
   /** Whether nothing stands between the two. */

@@ -134,8 +134,13 @@ public sealed interface Statement {
   /** {@code 50 per decade} or {@code 400 points}. */
   record Density(Expression count, boolean perDecade, Span span) {}
 
-  /** {@code limit CRITERION SCOPE…}. */
-  record Limit(Criterion criterion, List<ScopeItem> scope, Span span) implements Statement {}
+  /**
+   * {@code limit CRITERION SCOPE…}.
+   *
+   * @param text the statement as written, on one line
+   */
+  record Limit(Criterion criterion, List<ScopeItem> scope, String text, Span span)
+      implements Statement {}
 
   /** What a limit bounds. */
   sealed interface Criterion {

@@ -41,6 +41,7 @@ import org.jspecify.annotations.Nullable;
 /** Parse tree of a statement to its record. */
 final class StatementBuilder extends NetworkBaseVisitor<Statement> {
   private final Places places;
+  private final List<Token> line;
   private final Span span;
   private final NameReader names;
   private final ExpressionBuilder expressions;
@@ -48,10 +49,11 @@ final class StatementBuilder extends NetworkBaseVisitor<Statement> {
   private final Findings findings;
 
   /**
-   * @param span of the statement that is built
+   * @param line the tokens of the statement that is built
    */
-  StatementBuilder(Places places, Span span, Findings findings) {
-    this.span = span;
+  StatementBuilder(Places places, List<Token> line, Findings findings) {
+    this.line = line;
+    this.span = places.firstLine(line);
     this.places = places;
     this.names = new NameReader(places);
     this.expressions = new ExpressionBuilder(places, findings);
@@ -204,7 +206,10 @@ final class StatementBuilder extends NetworkBaseVisitor<Statement> {
   @Override
   public Statement visitLimit(LimitContext c) {
     return new Statement.Limit(
-        limits.criterion(c.criterion()), c.scope().stream().map(limits::scope).toList(), span);
+        limits.criterion(c.criterion()),
+        c.scope().stream().map(limits::scope).toList(),
+        Places.text(line),
+        span);
   }
 
   /** Whether a word of the language stands in a rule itself, not deeper. */

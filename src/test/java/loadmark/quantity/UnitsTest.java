@@ -26,7 +26,7 @@ class UnitsTest {
     "6,ns/m,6e-9",
     "3.3,fF,3.3e-15",
     "0.3,THz,3e11",
-    "5,mrad,5e-3",
+    "5,mV,5e-3",
   })
   void scalingRoundsOnceAsTheDecimalReads(String number, String unit, double value) {
     assertThat(Units.scaled(number, Units.find(unit).orElseThrow())).isEqualTo(value);
@@ -69,11 +69,12 @@ class UnitsTest {
         .contains(new Unit(1e-9, Dimension.INDUCTANCE.over(Dimension.LENGTH), "nH/m"));
   }
 
-  /** 180° is π by definition of the degree. */
+  /** π rad is 180° by definition of the degree; angles are kept in degrees. */
   @Test
-  void halfATurnIsPi() {
-    assertThat(Units.scaled("180", Units.find("deg").orElseThrow())).isEqualTo(Math.PI);
-    assertThat(Units.scaled("180", Units.find("°").orElseThrow())).isEqualTo(Math.PI);
+  void halfATurnIsAHundredAndEightyDegrees() {
+    assertThat(Units.scaled("11.5", Units.find("deg").orElseThrow())).isEqualTo(11.5);
+    assertThat(Units.scaled("180", Units.find("°").orElseThrow())).isEqualTo(180);
+    assertThat(Units.scaled("1", Units.find("rad").orElseThrow())).isEqualTo(180 / Math.PI);
   }
 
   @Test

@@ -35,7 +35,6 @@ class SlipTest {
         "not-known-yet; inductor l = 1 nH, «quality» 60 at 1 MHz; ''",
         "not-known-yet; load p shunt a -- b = «\"probe.s1p\"»; ''",
         "not-known-yet; load p shunt a -- b = 5 Ω + «probe»(trim = 12 pF); ''",
-        "not-known-yet; load p shunt a -- b = «probe»(); ''",
         "title-needs-quotes; network «Tap» one; \"…\"",
         "title-needs-quotes; network«»; \"…\"",
         // Names
