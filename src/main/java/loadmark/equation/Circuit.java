@@ -8,10 +8,10 @@ import java.util.List;
  *
  * @param nodes how many, with those inside two-terminals of several elements; what is linked is one
  * @param sources where the circuit is driven or measured: first the port, then the places of the
- *     loads that were asked for, each a {@link Branch.Kind#SHORT} or an {@link Branch.Kind#OPEN}
+ *     loads that were asked for, each a {@link CircuitBranch.Kind#SHORT} or an {@link CircuitBranch.Kind#OPEN}
  * @param elements resistors, inductors and capacitors, all of positive value
  */
-public record Circuit(int nodes, List<Branch> sources, List<Branch> elements) {
+public record Circuit(int nodes, List<CircuitBranch> sources, List<CircuitBranch> elements) {
 
   public Circuit {
     sources = List.copyOf(sources);
@@ -20,9 +20,9 @@ public record Circuit(int nodes, List<Branch> sources, List<Branch> elements) {
 
   /** The same with its port driven by a voltage, so that its current is what answers. */
   public Circuit withPortShort() {
-    List<Branch> changed = new ArrayList<>(sources);
-    Branch port = sources.get(0);
-    changed.set(0, new Branch(Branch.Kind.SHORT, port.from(), port.to(), 0));
+    List<CircuitBranch> changed = new ArrayList<>(sources);
+    CircuitBranch port = sources.get(0);
+    changed.set(0, new CircuitBranch(CircuitBranch.Kind.SHORT, port.from(), port.to(), 0));
     return new Circuit(nodes, changed, elements);
   }
 

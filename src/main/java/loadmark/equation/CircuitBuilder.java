@@ -17,8 +17,8 @@ import loadmark.network.Supply;
 /** Takes a network with a set of loads apart into a {@link Circuit}. */
 public final class CircuitBuilder {
   private final List<Integer> joined = new ArrayList<>();
-  private final List<Branch> sources = new ArrayList<>();
-  private final List<Branch> elements = new ArrayList<>();
+  private final List<CircuitBranch> sources = new ArrayList<>();
+  private final List<CircuitBranch> elements = new ArrayList<>();
 
   private CircuitBuilder(int nodes) {
     for (int i = 0; i < nodes; i++) {
@@ -51,7 +51,7 @@ public final class CircuitBuilder {
               () -> builder.join(supply.node().index(), ground.index()));
     }
     network.ports().stream().filter(p -> !p.equals(port)).forEach(builder::close);
-    Map<Load, Branch> placed = builder.addLoads(network, on, places);
+    Map<Load, CircuitBranch> placed = builder.addLoads(network, on, places);
     places.forEach(load -> builder.sources.add(placed.get(load)));
     return builder.circuit();
   }
@@ -74,8 +74,8 @@ public final class CircuitBuilder {
     }
   }
 
-  private Map<Load, Branch> addLoads(Network network, Collection<Load> on, List<Load> places) {
-    Map<Load, Branch> placed = new LinkedHashMap<>();
+  private Map<Load, CircuitBranch> addLoads(Network network, Collection<Load> on, List<Load> places) {
+    Map<Load, CircuitBranch> placed = new LinkedHashMap<>();
     Map<Set<Node>, List<Load>> series = new LinkedHashMap<>();
     for (Load load : network.loads()) {
       int first = load.first().index();
@@ -86,7 +86,7 @@ public final class CircuitBuilder {
             .add(load);
       } else if (on.contains(load)) {
         int inner = places.contains(load) ? newNode() : first;
-        placed.put(load, new Branch(Branch.Kind.SHORT, first, inner, 0));
+        placed.put(load, new CircuitBranch(CircuitBranch.Kind.SHORT, first, inner, 0));
         add(inner, second, load.value());
       } else {
         placed.put(load, open(first, second));
@@ -98,7 +98,7 @@ public final class CircuitBuilder {
 
   /** The series loads of one place, end to end from the first one's first node to its second. */
   private void addSeries(
-      List<Load> chain, Collection<Load> on, List<Load> places, Map<Load, Branch> placed) {
+      List<Load> chain, Collection<Load> on, List<Load> places, Map<Load, CircuitBranch> placed) {
     Node start = chain.get(0).first();
     int from = start.index();
     for (int i = 0; i < chain.size(); i++) {
@@ -110,7 +110,7 @@ public final class CircuitBuilder {
         add(first, second, load.value());
         placed.put(load, open(first, second));
       } else if (places.contains(load)) {
-        placed.put(load, new Branch(Branch.Kind.SHORT, first, second, 0));
+        placed.put(load, new CircuitBranch(CircuitBranch.Kind.SHORT, first, second, 0));
       } else {
         join(first, second);
       }
@@ -145,21 +145,21 @@ public final class CircuitBuilder {
         if (value == 0) {
           join(first, second);
         } else {
-          elements.add(new Branch(Branch.Kind.RESISTOR, first, second, value));
+          elements.add(new CircuitBranch(CircuitBranch.Kind.RESISTOR, first, second, value));
         }
       }
       case CONDUCTANCE -> {
         if (value > 0) {
-          elements.add(new Branch(Branch.Kind.RESISTOR, first, second, 1 / value));
+          elements.add(new CircuitBranch(CircuitBranch.Kind.RESISTOR, first, second, 1 / value));
         }
       }
-      case CAPACITANCE -> elements.add(new Branch(Branch.Kind.CAPACITOR, first, second, value));
-      case INDUCTANCE -> elements.add(new Branch(Branch.Kind.INDUCTOR, first, second, value));
+      case CAPACITANCE -> elements.add(new CircuitBranch(CircuitBranch.Kind.CAPACITOR, first, second, value));
+      case INDUCTANCE -> elements.add(new CircuitBranch(CircuitBranch.Kind.INDUCTOR, first, second, value));
     }
   }
 
-  private static Branch open(int from, int to) {
-    return new Branch(Branch.Kind.OPEN, from, to, 0);
+  private static CircuitBranch open(int from, int to) {
+    return new CircuitBranch(CircuitBranch.Kind.OPEN, from, to, 0);
   }
 
   private int newNode() {
@@ -181,9 +181,9 @@ public final class CircuitBuilder {
 
   /** Links resolved; elements whose ends are joined are left out, since no current leaves them. */
   private Circuit circuit() {
-    List<Branch> kept = new ArrayList<>();
-    for (Branch element : elements) {
-      Branch moved = moved(element);
+    List<CircuitBranch> kept = new ArrayList<>();
+    for (CircuitBranch element : elements) {
+      CircuitBranch moved = moved(element);
       if (moved.from() != moved.to()) {
         kept.add(moved);
       }
@@ -191,7 +191,7 @@ public final class CircuitBuilder {
     return new Circuit(joined.size(), sources.stream().map(this::moved).toList(), kept);
   }
 
-  private Branch moved(Branch branch) {
-    return new Branch(branch.kind(), root(branch.from()), root(branch.to()), branch.value());
+  private CircuitBranch moved(CircuitBranch branch) {
+    return new CircuitBranch(branch.kind(), root(branch.from()), root(branch.to()), branch.value());
   }
 }

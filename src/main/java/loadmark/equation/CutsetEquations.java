@@ -15,12 +15,12 @@ import java.util.List;
  * element values are never added to each other, and a small one is not lost beside a large one.
  */
 public final class CutsetEquations {
-  private final List<Branch> tree;
-  private final List<Branch> links;
+  private final List<CircuitBranch> tree;
+  private final List<CircuitBranch> links;
   private final int[] place;
   private final byte[][] f;
 
-  private CutsetEquations(List<Branch> tree, List<Branch> links, int[] place, byte[][] f) {
+  private CutsetEquations(List<CircuitBranch> tree, List<CircuitBranch> links, int[] place, byte[][] f) {
     this.tree = tree;
     this.links = links;
     this.place = place;
@@ -33,7 +33,7 @@ public final class CutsetEquations {
    * a voltage that doesn't matter; a {@code SHORT} across a short is a link.
    */
   public static CutsetEquations at(Circuit circuit, double s) {
-    List<Branch> all = new ArrayList<>(circuit.sources());
+    List<CircuitBranch> all = new ArrayList<>(circuit.sources());
     all.addAll(circuit.elements());
     Integer[] order = new Integer[all.size()];
     for (int i = 0; i < order.length; i++) {
@@ -42,12 +42,12 @@ public final class CutsetEquations {
     double[] ohm = all.stream().mapToDouble(b -> b.resistance(s)).toArray();
     java.util.Arrays.sort(order, Comparator.comparingDouble(i -> ohm[i]));
     Forest forest = new Forest(circuit.nodes());
-    List<Branch> tree = new ArrayList<>();
-    List<Branch> links = new ArrayList<>();
+    List<CircuitBranch> tree = new ArrayList<>();
+    List<CircuitBranch> links = new ArrayList<>();
     int[] place = new int[order.length];
     for (int i : order) {
-      Branch branch = all.get(i);
-      boolean inTree = branch.kind() != Branch.Kind.OPEN && forest.join(branch, tree.size());
+      CircuitBranch branch = all.get(i);
+      boolean inTree = branch.kind() != CircuitBranch.Kind.OPEN && forest.join(branch, tree.size());
       place[i] = inTree ? tree.size() : -1 - links.size();
       (inTree ? tree : links).add(branch);
     }
@@ -60,12 +60,12 @@ public final class CutsetEquations {
   }
 
   /** The tree's branches, in the order of the rows of F. */
-  public List<Branch> tree() {
+  public List<CircuitBranch> tree() {
     return tree;
   }
 
   /** The links, in the order of the columns of F. */
-  public List<Branch> links() {
+  public List<CircuitBranch> links() {
     return links;
   }
 

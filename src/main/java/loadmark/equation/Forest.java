@@ -31,7 +31,7 @@ final class Forest {
   }
 
   /** Takes the branch in as the given row, unless it closes a loop. */
-  boolean join(Branch branch, int row) {
+  boolean join(CircuitBranch branch, int row) {
     int a = find(branch.from());
     int b = find(branch.to());
     if (a == b) {
@@ -76,7 +76,7 @@ final class Forest {
   }
 
   /** Writes the way from the link's {@code from} to its {@code to} into its column of F. */
-  void walk(Branch link, int column, byte[][] f) {
+  void walk(CircuitBranch link, int column, byte[][] f) {
     int a = link.from();
     int b = link.to();
     while (a != b && depth[a] + depth[b] > 0) {

@@ -99,7 +99,7 @@ final class AlgebraicCrossings implements Crossings {
       case MAGNITUDE_CHANGE -> relative(systems.change(false, s0), value);
       case PHASE_CHANGE -> List.of(phaseOfOnePlus(systems.change(false, s0), value));
       case MAGNITUDE -> List.of(magnitude(systems.impedance(s0), value));
-      case PHASE -> List.of(phase(normal(systems.impedance(s0)).withInput(), value));
+      case PHASE -> List.of(phaseByParts(systems.impedanceParts(s0), value));
       case MAGNITUDE_WITHIN -> {
         StateSpace both = withReference(level, s0);
         Form above = equal(both, 1 + value);
@@ -107,7 +107,7 @@ final class AlgebraicCrossings implements Crossings {
       }
       case PHASE_WITHIN -> List.of(phase(withReference(level, s0), value));
       case PARALLEL_CAPACITANCE -> List.of(capacitance(systems.admittance(s0), value, s0));
-      case PARALLEL_RESISTANCE -> List.of(realPart(systems.admittance(s0), 1 / value));
+      case PARALLEL_RESISTANCE -> List.of(realPart(systems.admittanceParts(s0), 1 / value));
       case RETURN_LOSS -> List.of(reflection(withReference(level, s0), Math.pow(10, -value / 10)));
     };
   }
@@ -149,9 +149,13 @@ final class AlgebraicCrossings implements Crossings {
     return new Form(both, form(1, 0, -factor * factor));
   }
 
-  /** Re F = value. */
-  private static Form realPart(StateSpace f, double value) {
-    return new Form(f.scaled(1 / value).withInput(), form(0, 1, -2));
+  /** Re F = value, F being the last output and its real part the squares of all others. */
+  private static Form realPart(StateSpace parts, double value) {
+    int last = parts.outputs() - 1;
+    StateSpace roots = parts.part(0, last, 0, 1, 1 / Math.sqrt(value)).withInput();
+    DMatrixRMaj q = CommonOps_DDRM.identity(last + 1);
+    q.set(last, last, -1);
+    return new Form(roots, q);
   }
 
   /** |F1 − F2|² = power·|F1 + F2|². */
@@ -191,21 +195,41 @@ final class AlgebraicCrossings implements Crossings {
     return hermitian(both, -sine, 0, cosine);
   }
 
-  /**
-   * The form of two outputs whose matrix is 0, real + j·imaginary; real − j·imaginary, last: a real
-   * form of the system doubled.
-   */
+  /** The phase of F is ±degrees, F being the last output, its real part the others' squares. */
+  private static Form phaseByParts(StateSpace parts, double degrees) {
+    double sine = Math.sin(Math.toRadians(degrees));
+    double cosine = Math.cos(Math.toRadians(degrees));
+    int last = parts.outputs() - 1;
+    double unit = Math.max(Math.abs(parts.d().get(last, 0)), Double.MIN_NORMAL);
+    StateSpace both =
+        parts
+            .part(0, last, 0, 1, Math.sqrt(2 * Math.abs(sine) / unit))
+            .beside(parts.part(last, last + 1, 0, 1, 1 / unit))
+            .withInput();
+    DMatrixRMaj q = CommonOps_DDRM.identity(last + 2);
+    CommonOps_DDRM.scale(-Math.signum(sine), q);
+    q.set(last, last, 0);
+    q.set(last + 1, last + 1, 0);
+    return hermitian(both, q, cosine);
+  }
+
   private static Form hermitian(StateSpace one, double real, double last, double imaginary) {
-    DMatrixRMaj doubled = new DMatrixRMaj(4, 4);
-    for (int i = 0; i < 4; i += 2) {
-      doubled.set(i, i + 1, real);
-      doubled.set(i + 1, i, real);
-      doubled.set(i + 1, i + 1, last);
-    }
-    doubled.set(0, 3, -imaginary);
-    doubled.set(3, 0, -imaginary);
-    doubled.set(1, 2, imaginary);
-    doubled.set(2, 1, imaginary);
+    return hermitian(one, form(0, real, last), imaginary);
+  }
+
+  /**
+   * The form whose matrix is {@code q}, plus and minus j·imaginary between the last two outputs: a
+   * real form of the system doubled.
+   */
+  private static Form hermitian(StateSpace one, DMatrixRMaj q, double imaginary) {
+    int n = q.numRows;
+    DMatrixRMaj doubled = new DMatrixRMaj(2 * n, 2 * n);
+    CommonOps_DDRM.insert(q, doubled, 0, 0);
+    CommonOps_DDRM.insert(q, doubled, n, n);
+    doubled.set(n - 2, 2 * n - 1, -imaginary);
+    doubled.set(2 * n - 1, n - 2, -imaginary);
+    doubled.set(n - 1, 2 * n - 2, imaginary);
+    doubled.set(2 * n - 2, n - 1, imaginary);
     return new Form(one.twice(), doubled);
   }
 }

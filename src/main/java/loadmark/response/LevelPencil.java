@@ -3,13 +3,10 @@ package loadmark.response;
 import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.complex.Complex;
-import org.ejml.data.Complex_F64;
 import org.ejml.data.DMatrixRMaj;
 import org.ejml.dense.row.CommonOps_DDRM;
 import org.ejml.dense.row.NormOps_DDRM;
-import org.ejml.dense.row.factory.DecompositionFactory_DDRM;
 import org.ejml.dense.row.factory.LinearSolverFactory_DDRM;
-import org.ejml.interfaces.decomposition.EigenDecomposition_F64;
 import org.ejml.interfaces.linsol.LinearSolverDense;
 
 /**
@@ -74,39 +71,35 @@ final class LevelPencil {
   }
 
   private List<Complex> eigenvalues() {
-    double best = Double.POSITIVE_INFINITY;
-    double bestShift = 0;
-    DMatrixRMaj chosen = new DMatrixRMaj(0, 0);
+    Inverse best = new Inverse(0, Double.POSITIVE_INFINITY, n);
     for (double shift : SHIFTS) {
-      DMatrixRMaj inverse = new DMatrixRMaj(n.numRows, n.numCols);
-      double condition = invert(shift, inverse);
-      if (condition < best) {
-        best = condition;
-        bestShift = shift;
-        chosen = inverse;
-      }
-      if (condition < GOOD_CONDITION) {
+      Inverse next = invert(shift);
+      best = next.condition < best.condition ? next : best;
+      if (best.condition < GOOD_CONDITION) {
         break;
       }
     }
-    if (Double.isInfinite(best)) {
+    if (Double.isInfinite(best.condition)) {
       throw new ArithmeticException("the form is singular at every frequency");
     }
-    boolean infinite = Double.isInfinite(bestShift);
-    DMatrixRMaj t = product(chosen, infinite ? rows(false) : m);
+    boolean infinite = Double.isInfinite(best.shift);
+    DMatrixRMaj t = product(best.matrix, infinite ? rows(false) : m);
     List<Complex> found = new ArrayList<>();
-    for (Complex theta : eigenvaluesOf(Balance.of(t))) {
+    for (Complex theta : Eigenvalues.of(Balance.of(t))) {
       if (infinite) {
         found.add(theta.negate());
       } else if (theta.abs() > 0) {
-        found.add(new Complex(bestShift).subtract(theta.reciprocal()));
+        found.add(new Complex(best.shift).subtract(theta.reciprocal()));
       }
     }
     return found;
   }
 
-  /** The inverse of N + shift·M, or of its dynamic rows' M at infinity; gives its condition. */
-  private double invert(double shift, DMatrixRMaj inverse) {
+  /** The inverse at a shift, infinite in condition where there is none. */
+  private record Inverse(double shift, double condition, DMatrixRMaj matrix) {}
+
+  /** The inverse of N + shift·M, or of its dynamic rows' M at infinity rows there. */
+  private Inverse invert(double shift) {
     DMatrixRMaj at = new DMatrixRMaj(n.numRows, n.numCols);
     if (Double.isInfinite(shift)) {
       CommonOps_DDRM.add(m, rows(true), at);
@@ -116,11 +109,13 @@ final class LevelPencil {
     double norm = NormOps_DDRM.inducedPInf(at);
     LinearSolverDense<DMatrixRMaj> solver = LinearSolverFactory_DDRM.lu(at.numRows);
     if (!solver.setA(at)) {
-      return Double.POSITIVE_INFINITY;
+      return new Inverse(shift, Double.POSITIVE_INFINITY, at);
     }
+    DMatrixRMaj inverse = new DMatrixRMaj(at.numRows, at.numCols);
     solver.invert(inverse);
     double condition = norm * NormOps_DDRM.inducedPInf(inverse);
-    return Double.isFinite(condition) ? condition : Double.POSITIVE_INFINITY;
+    boolean regular = Double.isFinite(condition);
+    return new Inverse(shift, regular ? condition : Double.POSITIVE_INFINITY, inverse);
   }
 
   /** N with its algebraic rows alone, or with all others. */
@@ -131,28 +126,6 @@ final class LevelPencil {
       System.arraycopy(n.data, i * n.numCols, rows.data, i * n.numCols, n.numCols);
     }
     return rows;
-  }
-
-  /**
-   * The eigenvalues of a real matrix.
-   *
-   * @throws ArithmeticException where the iteration did not converge
-   */
-  static List<Complex> eigenvaluesOf(DMatrixRMaj matrix) {
-    List<Complex> found = new ArrayList<>();
-    if (matrix.numRows == 0) {
-      return found;
-    }
-    EigenDecomposition_F64<DMatrixRMaj> eigen =
-        DecompositionFactory_DDRM.eig(matrix.numRows, false);
-    if (!eigen.decompose(matrix)) {
-      throw new ArithmeticException("no eigenvalues of a matrix of " + matrix.numRows);
-    }
-    for (int i = 0; i < eigen.getNumberOfEigenvalues(); i++) {
-      Complex_F64 value = eigen.getEigenvalue(i);
-      found.add(new Complex(value.real, value.imaginary));
-    }
-    return found;
   }
 
   private static void insert(DMatrixRMaj from, DMatrixRMaj to, int row, int column) {

@@ -55,6 +55,16 @@ final class PortSystems {
     return WaveRealisation.of(circuit, s0).part(0, 0, -1);
   }
 
+  /** Z_with, Ω, after what its real part is the sum of the squares of, √Ω. */
+  StateSpace impedanceParts(double s0) {
+    return WaveRealisation.powers(with, s0);
+  }
+
+  /** 1/Z_with, S, after what its real part is the sum of the squares of, √S. */
+  StateSpace admittanceParts(double s0) {
+    return WaveRealisation.powers(with.withPortShort(), s0);
+  }
+
   /** 1/Z_with, S. */
   StateSpace admittance(double s0) {
     return WaveRealisation.of(with.withPortShort(), s0).part(0, 0, -1);

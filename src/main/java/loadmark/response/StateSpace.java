@@ -58,6 +58,11 @@ record StateSpace(DMatrixRMaj a, DMatrixRMaj b, DMatrixRMaj c, DMatrixRMaj d) {
     return part(0, outputs(), 0, inputs(), factor);
   }
 
+  /** The outputs of this, then those of {@code other}, which has the same A and B. */
+  StateSpace beside(StateSpace other) {
+    return new StateSpace(a, b, above(c, other.c), above(d, other.d));
+  }
+
   /** With a second input that is a second output as it is. */
   StateSpace besideWire() {
     DMatrixRMaj zero = new DMatrixRMaj(1, 1);

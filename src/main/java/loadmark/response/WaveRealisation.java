@@ -1,7 +1,8 @@
 package loadmark.response;
 
 import java.util.List;
-import loadmark.equation.Branch;
+import java.util.stream.IntStream;
+import loadmark.equation.CircuitBranch;
 import loadmark.equation.Circuit;
 import loadmark.equation.CutsetEquations;
 import org.ejml.data.DMatrixRMaj;
@@ -40,10 +41,44 @@ final class WaveRealisation {
    * @param s0 rad/s
    */
   static StateSpace of(Circuit circuit, double s0) {
-    return new WaveRealisation(circuit, s0).solve();
+    WaveRealisation realisation = new WaveRealisation(circuit, s0);
+    int[] states = realisation.elements(true);
+    return realisation.read(realisation.solve(states), states);
   }
 
-  private static double[] roots(List<Branch> branches, double s0) {
+  /**
+   * From the port to the powers of all resistors: each output squared is the power (W) that a
+   * resistor takes up, so that the real part of the port's impedance or admittance is a sum of
+   * positive terms, however small it is beside the imaginary part. Last comes the port's own output.
+   *
+   * @param s0 rad/s
+   */
+  static StateSpace powers(Circuit circuit, double s0) {
+    WaveRealisation realisation = new WaveRealisation(circuit, s0);
+    int[] states = realisation.elements(true);
+    DMatrixRMaj waves = realisation.solve(states);
+    StateSpace port = realisation.read(waves, states).part(0, 0, -1);
+    int[] resistors = realisation.elements(false);
+    int n = states.length;
+    DMatrixRMaj c = new DMatrixRMaj(resistors.length, n);
+    DMatrixRMaj d = new DMatrixRMaj(resistors.length, 1);
+    for (int k = 0; k < resistors.length; k++) {
+      int row = realisation.row(resistors[k] + circuit.sources().size());
+      for (int j = 0; j < n; j++) {
+        c.set(k, j, waves.get(row, j));
+      }
+      d.set(k, 0, waves.get(row, n));
+    }
+    return new StateSpace(port.a(), port.b(), c, d).beside(port);
+  }
+
+  private int[] elements(boolean reactive) {
+    return IntStream.range(0, circuit.elements().size())
+        .filter(i -> circuit.elements().get(i).kind().isReactive() == reactive)
+        .toArray();
+  }
+
+  private static double[] roots(List<CircuitBranch> branches, double s0) {
     return branches.stream().mapToDouble(b -> Math.sqrt(b.resistance(s0))).toArray();
   }
 
@@ -52,13 +87,8 @@ final class WaveRealisation {
     return place >= 0 ? place : treeRoot.length - 1 - place;
   }
 
-  private StateSpace solve() {
-    List<Branch> elements = circuit.elements();
+  private DMatrixRMaj solve(int[] states) {
     int sources = circuit.sources().size();
-    int[] states =
-        java.util.stream.IntStream.range(0, elements.size())
-            .filter(i -> elements.get(i).kind().isReactive())
-            .toArray();
     int n = states.length;
     DMatrixRMaj right = new DMatrixRMaj(treeRoot.length + linkRoot.length, n + sources);
     for (int k = 0; k < n; k++) {
@@ -73,12 +103,12 @@ final class WaveRealisation {
       throw new ArithmeticException("1 + S is singular");
     }
     solver.solve(right, waves);
-    return read(waves, states);
+    return waves;
   }
 
   /** An element takes part; sources are given and do not. */
-  private static boolean carries(Branch branch) {
-    return branch.kind() != Branch.Kind.SHORT && branch.kind() != Branch.Kind.OPEN;
+  private static boolean carries(CircuitBranch branch) {
+    return branch.kind() != CircuitBranch.Kind.SHORT && branch.kind() != CircuitBranch.Kind.OPEN;
   }
 
   private double weight(int t, int l) {
@@ -126,14 +156,14 @@ final class WaveRealisation {
   private void drive(int branch, DMatrixRMaj right, int column) {
     int trees = treeRoot.length;
     int place = equations.place(branch);
-    Branch.Kind kind = circuit.sources().get(branch).kind();
-    if (kind == Branch.Kind.SHORT && place >= 0) {
+    CircuitBranch.Kind kind = circuit.sources().get(branch).kind();
+    if (kind == CircuitBranch.Kind.SHORT && place >= 0) {
       for (int l = 0; l < linkRoot.length; l++) {
         if (carries(equations.links().get(l))) {
           right.set(trees + l, column, equations.sign(place, l) / linkRoot[l]);
         }
       }
-    } else if (kind == Branch.Kind.OPEN) {
+    } else if (kind == CircuitBranch.Kind.OPEN) {
       for (int t = 0; t < trees; t++) {
         if (carries(equations.tree().get(t))) {
           right.set(t, column, -equations.sign(t, -1 - place) * treeRoot[t]);
@@ -151,7 +181,7 @@ final class WaveRealisation {
     DMatrixRMaj d = new DMatrixRMaj(sources, sources);
     for (int k = 0; k < n; k++) {
       int row = row(states[k] + sources);
-      int sign = circuit.elements().get(states[k]).kind() == Branch.Kind.INDUCTOR ? 1 : -1;
+      int sign = circuit.elements().get(states[k]).kind() == CircuitBranch.Kind.INDUCTOR ? 1 : -1;
       for (int j = 0; j < n; j++) {
         a.set(k, j, sign * waves.get(row, j));
       }
@@ -180,7 +210,7 @@ final class WaveRealisation {
     int trees = treeRoot.length;
     int place = equations.place(k);
     double sum = 0;
-    if (circuit.sources().get(k).kind() == Branch.Kind.OPEN) {
+    if (circuit.sources().get(k).kind() == CircuitBranch.Kind.OPEN) {
       for (int t = 0; t < trees; t++) {
         int sign = equations.sign(t, -1 - place);
         if (sign != 0 && carries(equations.tree().get(t))) {

@@ -7,7 +7,7 @@ package loadmark.equation;
  *     to}
  * @param value Ω, H or F; 0 for the two kinds without a value
  */
-public record Branch(Kind kind, int from, int to, double value) {
+public record CircuitBranch(Kind kind, int from, int to, double value) {
 
   /** What it is. */
   public enum Kind {

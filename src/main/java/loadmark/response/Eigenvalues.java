@@ -1,0 +1,58 @@
+package loadmark.response;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import org.apache.commons.math3.complex.Complex;
+import org.apache.commons.math3.exception.MathArithmeticException;
+import org.apache.commons.math3.exception.MathIllegalStateException;
+import org.apache.commons.math3.linear.Array2DRowRealMatrix;
+import org.apache.commons.math3.linear.EigenDecomposition;
+import org.ejml.data.Complex_F64;
+import org.ejml.data.DMatrixRMaj;
+import org.ejml.dense.row.factory.DecompositionFactory_DDRM;
+import org.ejml.interfaces.decomposition.EigenDecomposition_F64;
+
+/** The eigenvalues of a real square matrix. */
+final class Eigenvalues {
+  private Eigenvalues() {}
+
+  /**
+   * All of them, by a second library where the first one's iteration does not converge.
+   *
+   * @throws ArithmeticException where neither converges
+   */
+  static List<Complex> of(DMatrixRMaj matrix) {
+    List<Complex> found = new ArrayList<>();
+    if (matrix.numRows == 0) {
+      return found;
+    }
+    EigenDecomposition_F64<DMatrixRMaj> eigen =
+        DecompositionFactory_DDRM.eig(matrix.numRows, false);
+    if (!eigen.decompose(matrix.copy())) {
+      return bySecondLibrary(matrix);
+    }
+    for (int i = 0; i < eigen.getNumberOfEigenvalues(); i++) {
+      Complex_F64 value = eigen.getEigenvalue(i);
+      found.add(new Complex(value.real, value.imaginary));
+    }
+    return found;
+  }
+
+  private static List<Complex> bySecondLibrary(DMatrixRMaj matrix) {
+    try {
+      double[][] rows = new double[matrix.numRows][];
+      for (int i = 0; i < rows.length; i++) {
+        rows[i] = Arrays.copyOfRange(matrix.data, i * rows.length, (i + 1) * rows.length);
+      }
+      EigenDecomposition eigen = new EigenDecomposition(new Array2DRowRealMatrix(rows, false));
+      List<Complex> found = new ArrayList<>();
+      for (int i = 0; i < matrix.numRows; i++) {
+        found.add(new Complex(eigen.getRealEigenvalue(i), eigen.getImagEigenvalue(i)));
+      }
+      return found;
+    } catch (MathIllegalStateException | MathArithmeticException notFound) {
+      throw new ArithmeticException("no eigenvalues of a matrix of " + matrix.numRows);
+    }
+  }
+}
