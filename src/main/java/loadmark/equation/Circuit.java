@@ -8,7 +8,8 @@ import java.util.List;
  *
  * @param nodes how many, with those inside two-terminals of several elements; what is linked is one
  * @param sources where the circuit is driven or measured: first the port, then the places of the
- *     loads that were asked for, each a {@link CircuitBranch.Kind#SHORT} or an {@link CircuitBranch.Kind#OPEN}
+ *     loads that were asked for, each a {@link CircuitBranch.Kind#SHORT} or an {@link
+ *     CircuitBranch.Kind#OPEN}
  * @param elements resistors, inductors and capacitors, all of positive value
  */
 public record Circuit(int nodes, List<CircuitBranch> sources, List<CircuitBranch> elements) {

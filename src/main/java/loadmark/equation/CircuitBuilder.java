@@ -74,7 +74,8 @@ public final class CircuitBuilder {
     }
   }
 
-  private Map<Load, CircuitBranch> addLoads(Network network, Collection<Load> on, List<Load> places) {
+  private Map<Load, CircuitBranch> addLoads(
+      Network network, Collection<Load> on, List<Load> places) {
     Map<Load, CircuitBranch> placed = new LinkedHashMap<>();
     Map<Set<Node>, List<Load>> series = new LinkedHashMap<>();
     for (Load load : network.loads()) {
@@ -153,8 +154,10 @@ public final class CircuitBuilder {
           elements.add(new CircuitBranch(CircuitBranch.Kind.RESISTOR, first, second, 1 / value));
         }
       }
-      case CAPACITANCE -> elements.add(new CircuitBranch(CircuitBranch.Kind.CAPACITOR, first, second, value));
-      case INDUCTANCE -> elements.add(new CircuitBranch(CircuitBranch.Kind.INDUCTOR, first, second, value));
+      case CAPACITANCE ->
+          elements.add(new CircuitBranch(CircuitBranch.Kind.CAPACITOR, first, second, value));
+      case INDUCTANCE ->
+          elements.add(new CircuitBranch(CircuitBranch.Kind.INDUCTOR, first, second, value));
     }
   }
 

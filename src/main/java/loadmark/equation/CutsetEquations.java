@@ -20,7 +20,8 @@ public final class CutsetEquations {
   private final int[] place;
   private final byte[][] f;
 
-  private CutsetEquations(List<CircuitBranch> tree, List<CircuitBranch> links, int[] place, byte[][] f) {
+  private CutsetEquations(
+      List<CircuitBranch> tree, List<CircuitBranch> links, int[] place, byte[][] f) {
     this.tree = tree;
     this.links = links;
     this.place = place;

@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import loadmark.equation.Circuit;
-import loadmark.equation.CircuitBranch;
 import loadmark.equation.CircuitBuilder;
+import loadmark.equation.Rates;
 import loadmark.network.Load;
 import loadmark.network.Network;
 import loadmark.network.Port;
@@ -21,7 +21,9 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
   /** Shifts a decade apart know their eigenvalues to within a factor of 3 of themselves best. */
   private static final double STEP = 10;
 
-  /** Two shifts that both claim an eigenvalue at their border differ by less than this, relative. */
+  /**
+   * Two shifts that both claim an eigenvalue at their border differ by less than this, relative.
+   */
   private static final double SAME = 1e-5;
 
   /** How far beyond its border a shift claims. */
@@ -46,7 +48,8 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
   }
 
   static PortRoots of(Circuit circuit) {
-    double[] range = range(circuit);
+    double margin = 10.0 * (1 + circuit.elements().size());
+    Rates range = Rates.of(circuit).widened(margin);
     List<Complex> poles = eigenvalues(circuit, range);
     List<Complex> zeros = eigenvalues(circuit.withPortShort(), range);
     List<Complex> seenPoles = new ArrayList<>();
@@ -61,7 +64,7 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
         seenZeros.add(zero);
       }
     }
-    addRootAtZero(circuit, range[0], seenPoles, seenZeros);
+    addRootAtZero(circuit, range.slowest(), seenPoles, seenZeros);
     return new PortRoots(sorted(seenPoles), sorted(seenZeros));
   }
 
@@ -70,44 +73,14 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
     return roots;
   }
 
-  /** Below and above all finite roots but 0, rad/s: the extreme time constants, and the order. */
-  private static double[] range(Circuit circuit) {
-    double[] low = {Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY};
-    double[] high = {0, 0, 0};
-    for (CircuitBranch element : circuit.elements()) {
-      int kind = element.kind().ordinal();
-      low[kind] = Math.min(low[kind], element.value());
-      high[kind] = Math.max(high[kind], element.value());
-    }
-    int r = CircuitBranch.Kind.RESISTOR.ordinal();
-    int l = CircuitBranch.Kind.INDUCTOR.ordinal();
-    int c = CircuitBranch.Kind.CAPACITOR.ordinal();
-    double from = Double.POSITIVE_INFINITY;
-    double to = 0;
-    if (high[r] > 0 && high[c] > 0) {
-      from = Math.min(from, 1 / high[r] / high[c]);
-      to = Math.max(to, 1 / low[r] / low[c]);
-    }
-    if (high[r] > 0 && high[l] > 0) {
-      from = Math.min(from, low[r] / high[l]);
-      to = Math.max(to, high[r] / low[l]);
-    }
-    if (high[l] > 0 && high[c] > 0) {
-      from = Math.min(from, 1 / Math.sqrt(high[l]) / Math.sqrt(high[c]));
-      to = Math.max(to, 1 / Math.sqrt(low[l]) / Math.sqrt(low[c]));
-    }
-    double margin = 10.0 * (1 + circuit.elements().size());
-    return to == 0 ? new double[] {1, 1} : new double[] {from / margin, to * margin};
-  }
-
   /** The eigenvalues in the range, each from the shift next to it. */
-  private static List<Complex> eigenvalues(Circuit circuit, double[] range) {
+  private static List<Complex> eigenvalues(Circuit circuit, Rates range) {
     List<Complex> found = new ArrayList<>();
     if (circuit.reactive() == 0) {
       return found;
     }
     double half = Math.sqrt(STEP);
-    for (double s0 = range[0]; s0 < range[1] * STEP; s0 *= STEP) {
+    for (double s0 = range.slowest(); s0 < range.fastest() * STEP; s0 *= STEP) {
       List<Complex> before = List.copyOf(found);
       for (Complex zeta : Eigenvalues.of(WaveRealisation.of(circuit, s0).a())) {
         Complex s = fromZeta(zeta, s0);

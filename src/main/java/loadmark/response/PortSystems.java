@@ -51,23 +51,27 @@ final class PortSystems {
     return impedance(CircuitBuilder.build(alone), s0);
   }
 
+  /** 1/Z of a two-terminal, S. */
+  static StateSpace admittance(OnePort alone, double s0) {
+    return admittance(CircuitBuilder.build(alone), s0);
+  }
+
+  private static StateSpace admittance(Circuit circuit, double s0) {
+    return WaveRealisation.of(circuit.withPortShort(), s0).part(0, 0, -1);
+  }
+
   private static StateSpace impedance(Circuit circuit, double s0) {
     return WaveRealisation.of(circuit, s0).part(0, 0, -1);
   }
 
-  /** Z_with, Ω, after what its real part is the sum of the squares of, √Ω. */
-  StateSpace impedanceParts(double s0) {
-    return WaveRealisation.powers(with, s0);
-  }
-
-  /** 1/Z_with, S, after what its real part is the sum of the squares of, √S. */
+  /** What Re(1/Z_with) is the sum of the squares of, √S: an output a resistor. */
   StateSpace admittanceParts(double s0) {
     return WaveRealisation.powers(with.withPortShort(), s0);
   }
 
   /** 1/Z_with, S. */
   StateSpace admittance(double s0) {
-    return WaveRealisation.of(with.withPortShort(), s0).part(0, 0, -1);
+    return admittance(with, s0);
   }
 
   /**

@@ -58,22 +58,6 @@ record StateSpace(DMatrixRMaj a, DMatrixRMaj b, DMatrixRMaj c, DMatrixRMaj d) {
     return part(0, outputs(), 0, inputs(), factor);
   }
 
-  /** The outputs of this, then those of {@code other}, which has the same A and B. */
-  StateSpace beside(StateSpace other) {
-    return new StateSpace(a, b, above(c, other.c), above(d, other.d));
-  }
-
-  /** With a second input that is a second output as it is. */
-  StateSpace besideWire() {
-    DMatrixRMaj zero = new DMatrixRMaj(1, 1);
-    DMatrixRMaj one = new DMatrixRMaj(1, 1, true, 1);
-    return new StateSpace(
-        a,
-        beside(b, new DMatrixRMaj(states(), 1)),
-        above(c, new DMatrixRMaj(1, states())),
-        corners(d, zero, zero, one));
-  }
-
   /** The output plus the input, of a system with one of each. */
   StateSpace plusInput() {
     return new StateSpace(a, b, c, new DMatrixRMaj(1, 1, true, d.get(0, 0) + 1));
@@ -109,16 +93,6 @@ record StateSpace(DMatrixRMaj a, DMatrixRMaj b, DMatrixRMaj c, DMatrixRMaj d) {
   /** The outputs, and after them the input itself, of a system with one input. */
   StateSpace withInput() {
     return with(wire(1));
-  }
-
-  /** Two of it side by side, inputs, outputs and all. */
-  StateSpace twice() {
-    return new StateSpace(diagonal(a), diagonal(b), diagonal(c), diagonal(d));
-  }
-
-  private static DMatrixRMaj diagonal(DMatrixRMaj m) {
-    DMatrixRMaj zero = new DMatrixRMaj(m.numRows, m.numCols);
-    return corners(m, zero, zero, m);
   }
 
   private static DMatrixRMaj product(DMatrixRMaj left, DMatrixRMaj right) {

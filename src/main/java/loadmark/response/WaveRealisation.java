@@ -2,8 +2,8 @@ package loadmark.response;
 
 import java.util.List;
 import java.util.stream.IntStream;
-import loadmark.equation.CircuitBranch;
 import loadmark.equation.Circuit;
+import loadmark.equation.CircuitBranch;
 import loadmark.equation.CutsetEquations;
 import org.ejml.data.DMatrixRMaj;
 import org.ejml.dense.row.factory.LinearSolverFactory_DDRM;
@@ -49,7 +49,7 @@ final class WaveRealisation {
   /**
    * From the port to the powers of all resistors: each output squared is the power (W) that a
    * resistor takes up, so that the real part of the port's impedance or admittance is a sum of
-   * positive terms, however small it is beside the imaginary part. Last comes the port's own output.
+   * positive terms, however small it is beside the imaginary part.
    *
    * @param s0 rad/s
    */
@@ -69,7 +69,7 @@ final class WaveRealisation {
       }
       d.set(k, 0, waves.get(row, n));
     }
-    return new StateSpace(port.a(), port.b(), c, d).beside(port);
+    return new StateSpace(port.a(), port.b(), c, d);
   }
 
   private int[] elements(boolean reactive) {
