@@ -20,6 +20,12 @@ final class AlgebraicCrossings implements Crossings {
   /** How far a shift looks beyond its own part of the band. */
   private static final double OVERLAP = 1.1;
 
+  /** What two shifts find this close to each other, relative, is one and the same. */
+  private static final double SAME = 1e-9;
+
+  /** A candidate this far beyond an end of the band may be a crossing at the end. */
+  private static final double AT_END = 1 + 1e-6;
+
   private final PortSystems systems;
 
   AlgebraicCrossings(Network network, Port port, List<Load> loads, List<Load> against) {
@@ -50,22 +56,28 @@ final class AlgebraicCrossings implements Crossings {
     }
     int shifts = 1 + (int) Math.floor(Math.log10(band.toHz() / band.fromHz()));
     double step = Math.pow(band.toHz() / band.fromHz(), 1.0 / shifts);
+    double half = Math.sqrt(step) * OVERLAP;
     double[] found = {};
     for (int i = 0; i < shifts; i++) {
       double centre = band.fromHz() * Math.pow(step, i + 0.5);
-      double half = Math.sqrt(step) * OVERLAP;
-      double[] part =
+      double[] before = found;
+      DoubleStream here =
           near(level, 2 * Math.PI * centre)
               .map(omega -> omega / (2 * Math.PI))
               .filter(hz -> centre / half <= hz && hz <= centre * half)
-              .toArray();
-      found = DoubleStream.concat(Arrays.stream(found), Arrays.stream(part)).toArray();
+              .filter(hz -> Arrays.stream(before).noneMatch(b -> isSame(b, hz)));
+      found = DoubleStream.concat(Arrays.stream(before), here).toArray();
     }
     return Arrays.stream(found)
+        .filter(hz -> band.fromHz() / AT_END <= hz && hz <= band.toHz() * AT_END)
         .map(hz -> Math.min(Math.max(hz, band.fromHz()), band.toHz()))
         .sorted()
         .distinct()
         .toArray();
+  }
+
+  private static boolean isSame(double a, double b) {
+    return Math.abs(a - b) <= SAME * a;
   }
 
   /** The candidates that a shift finds, rad/s. */

@@ -3,6 +3,7 @@ package loadmark.response;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import org.apache.commons.math3.complex.Complex;
 import org.apache.commons.math3.exception.MathArithmeticException;
 import org.apache.commons.math3.exception.MathIllegalStateException;
@@ -18,41 +19,48 @@ final class Eigenvalues {
   private Eigenvalues() {}
 
   /**
-   * All of them, by a second library where the first one's iteration does not converge.
+   * All of them.
    *
-   * @throws ArithmeticException where neither converges
+   * @throws ArithmeticException where the iteration does not converge
    */
   static List<Complex> of(DMatrixRMaj matrix) {
-    List<Complex> found = new ArrayList<>();
+    return find(matrix)
+        .orElseThrow(
+            () -> new ArithmeticException("no eigenvalues of a matrix of " + matrix.numRows));
+  }
+
+  /** All of them; by a second library where the first one's iteration does not converge. */
+  static Optional<List<Complex>> find(DMatrixRMaj matrix) {
     if (matrix.numRows == 0) {
-      return found;
+      return Optional.of(List.of());
     }
     EigenDecomposition_F64<DMatrixRMaj> eigen =
         DecompositionFactory_DDRM.eig(matrix.numRows, false);
     if (!eigen.decompose(matrix.copy())) {
       return bySecondLibrary(matrix);
     }
+    List<Complex> found = new ArrayList<>();
     for (int i = 0; i < eigen.getNumberOfEigenvalues(); i++) {
       Complex_F64 value = eigen.getEigenvalue(i);
       found.add(new Complex(value.real, value.imaginary));
     }
-    return found;
+    return Optional.of(found);
   }
 
-  private static List<Complex> bySecondLibrary(DMatrixRMaj matrix) {
+  private static Optional<List<Complex>> bySecondLibrary(DMatrixRMaj matrix) {
+    double[][] rows = new double[matrix.numRows][];
+    for (int i = 0; i < rows.length; i++) {
+      rows[i] = Arrays.copyOfRange(matrix.data, i * rows.length, (i + 1) * rows.length);
+    }
     try {
-      double[][] rows = new double[matrix.numRows][];
-      for (int i = 0; i < rows.length; i++) {
-        rows[i] = Arrays.copyOfRange(matrix.data, i * rows.length, (i + 1) * rows.length);
-      }
       EigenDecomposition eigen = new EigenDecomposition(new Array2DRowRealMatrix(rows, false));
       List<Complex> found = new ArrayList<>();
-      for (int i = 0; i < matrix.numRows; i++) {
+      for (int i = 0; i < rows.length; i++) {
         found.add(new Complex(eigen.getRealEigenvalue(i), eigen.getImagEigenvalue(i)));
       }
-      return found;
+      return Optional.of(found);
     } catch (MathIllegalStateException | MathArithmeticException notFound) {
-      throw new ArithmeticException("no eigenvalues of a matrix of " + matrix.numRows);
+      return Optional.empty();
     }
   }
 }

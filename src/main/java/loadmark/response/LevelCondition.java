@@ -1,5 +1,6 @@
 package loadmark.response;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.complex.Complex;
 import org.ejml.data.DMatrixRMaj;
@@ -15,22 +16,28 @@ sealed interface LevelCondition {
   record Form(StateSpace system, DMatrixRMaj q) implements LevelCondition {
     @Override
     public List<Complex> roots() {
-      return system.states() == 0
-          ? List.of()
-          : LevelPencil.eigenvalues(system, q).stream()
-              .map(zeta -> zeta.add(1).divide(zeta.subtract(1)))
-              .toList();
+      return system.states() == 0 ? List.of() : inS(LevelPencil.eigenvalues(system, q));
     }
   }
 
-  /** Real and imaginary part of the output lie on a line. */
+  /**
+   * Real and imaginary part of the output lie on a line. At a pole on the axis the output goes from
+   * one side to the other without being on it, so that poles count as roots.
+   */
   record Line(StateSpace system, LinePencil pencil) implements LevelCondition {
     @Override
     public List<Complex> roots() {
-      return system.states() == 0
-          ? List.of()
-          : pencil.eigenvalues(system).stream().map(Complex.I::multiply).toList();
+      if (system.states() == 0) {
+        return List.of();
+      }
+      List<Complex> roots = new ArrayList<>(inS(Eigenvalues.of(system.a())));
+      pencil.eigenvalues(system).forEach(omega -> roots.add(omega.multiply(Complex.I)));
+      return roots;
     }
+  }
+
+  private static List<Complex> inS(List<Complex> zetas) {
+    return zetas.stream().map(zeta -> zeta.add(1).divide(zeta.subtract(1))).toList();
   }
 
   /** The conditions whose roots together are those of the level. */

@@ -1,7 +1,9 @@
 package loadmark.response;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import org.apache.commons.math3.complex.Complex;
 import org.ejml.data.DMatrixRMaj;
 import org.ejml.dense.row.CommonOps_DDRM;
@@ -24,37 +26,45 @@ final class ShiftedPencil {
    *     come out
    */
   static List<Complex> eigenvalues(DMatrixRMaj p, DMatrixRMaj r, double[] shifts) {
-    Inverse best = new Inverse(0, Double.POSITIVE_INFINITY, p);
+    List<Inverse> poor = new ArrayList<>();
     for (double shift : shifts) {
-      Inverse next = invert(p, r, shift);
-      best = next.condition < best.condition ? next : best;
-      if (best.condition < GOOD_CONDITION) {
-        break;
+      Inverse inverse = invert(p, r, shift);
+      Optional<List<Complex>> found =
+          inverse.condition < GOOD_CONDITION ? inverse.findEigenvalues(r) : Optional.empty();
+      if (found.isPresent()) {
+        return found.get();
       }
+      poor.add(inverse);
     }
-    if (Double.isInfinite(best.condition)) {
-      throw new ArithmeticException("the pencil is singular everywhere");
-    }
-    DMatrixRMaj t = new DMatrixRMaj(p.numRows, p.numCols);
-    CommonOps_DDRM.mult(best.matrix, r, t);
-    // Moved away from 0, where those of infinity gather and the iteration would not tell them
-    // apart.
-    double moved = 1 / best.shift;
-    for (int i = 0; i < t.numRows; i++) {
-      t.add(i, i, moved);
-    }
-    List<Complex> found = new ArrayList<>();
-    for (Complex eigenvalue : Eigenvalues.of(Balance.of(t))) {
-      Complex theta = eigenvalue.subtract(moved);
-      if (theta.abs() > 0) {
-        found.add(new Complex(best.shift).subtract(theta.reciprocal()));
-      }
-    }
-    return found;
+    return poor.stream()
+        .filter(inverse -> Double.isFinite(inverse.condition))
+        .sorted(Comparator.comparingDouble(Inverse::condition))
+        .flatMap(inverse -> inverse.findEigenvalues(r).stream())
+        .findFirst()
+        .orElseThrow(() -> new ArithmeticException("no eigenvalues of a pencil of " + p.numRows));
   }
 
   /** The inverse at a shift; without one the condition is infinite. */
-  private record Inverse(double shift, double condition, DMatrixRMaj matrix) {}
+  private record Inverse(double shift, double condition, DMatrixRMaj matrix) {
+
+    Optional<List<Complex>> findEigenvalues(DMatrixRMaj r) {
+      DMatrixRMaj t = new DMatrixRMaj(r.numRows, r.numCols);
+      CommonOps_DDRM.mult(matrix, r, t);
+      // Away from 0, where those of infinity gather and the iteration would not tell them apart.
+      double moved = 1 / shift;
+      for (int i = 0; i < t.numRows; i++) {
+        t.add(i, i, moved);
+      }
+      return Eigenvalues.find(Balance.of(t))
+          .map(
+              all ->
+                  all.stream()
+                      .map(eigenvalue -> eigenvalue.subtract(moved))
+                      .filter(theta -> theta.abs() > 0)
+                      .map(theta -> theta.reciprocal().negate().add(shift))
+                      .toList());
+    }
+  }
 
   private static Inverse invert(DMatrixRMaj p, DMatrixRMaj r, double shift) {
     DMatrixRMaj at = new DMatrixRMaj(p.numRows, p.numCols);

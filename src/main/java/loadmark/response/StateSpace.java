@@ -45,12 +45,23 @@ record StateSpace(DMatrixRMaj a, DMatrixRMaj b, DMatrixRMaj c, DMatrixRMaj d) {
 
   /** Only some inputs and outputs, first ones in, last ones out; outputs times a factor. */
   StateSpace part(int fromOutput, int toOutput, int fromInput, int toInput, double factor) {
-    int n = states();
-    DMatrixRMaj rows = CommonOps_DDRM.extract(c, fromOutput, toOutput, 0, n);
-    DMatrixRMaj through = CommonOps_DDRM.extract(d, fromOutput, toOutput, fromInput, toInput);
+    DMatrixRMaj rows = block(c, fromOutput, toOutput, 0, states());
+    DMatrixRMaj through = block(d, fromOutput, toOutput, fromInput, toInput);
     CommonOps_DDRM.scale(factor, rows);
     CommonOps_DDRM.scale(factor, through);
-    return new StateSpace(a, CommonOps_DDRM.extract(b, 0, n, fromInput, toInput), rows, through);
+    return new StateSpace(a, block(b, 0, states(), fromInput, toInput), rows, through);
+  }
+
+  /** May be empty, which the library's own does not allow. */
+  private static DMatrixRMaj block(
+      DMatrixRMaj from, int fromRow, int toRow, int fromColumn, int toColumn) {
+    DMatrixRMaj block = new DMatrixRMaj(toRow - fromRow, toColumn - fromColumn);
+    for (int i = fromRow; i < toRow; i++) {
+      for (int j = fromColumn; j < toColumn; j++) {
+        block.set(i - fromRow, j - fromColumn, from.get(i, j));
+      }
+    }
+    return block;
   }
 
   /** All of it, the outputs multiplied by a factor. */

@@ -14,14 +14,14 @@ import loadmark.network.Band;
  * @param complete whether the sign between neighbouring candidates was one and the same wherever it
  *     was looked at
  */
-public record SignChanges(List<Double> edges, List<Boolean> positive, boolean complete) {
+record SignChanges(List<Double> edges, List<Boolean> positive, boolean complete) {
   /** Where between two neighbours the sign is looked at, as parts of their ratio. */
   private static final double[] BETWEEN = {0.02, 0.25, 0.5, 0.75, 0.98};
 
   /** Candidates closer than this, relative, may stand for crossings that lie beside them. */
   private static final double CLOSE = 1e-6;
 
-  public SignChanges {
+  SignChanges {
     edges = List.copyOf(edges);
     positive = List.copyOf(positive);
   }
@@ -33,7 +33,7 @@ public record SignChanges(List<Double> edges, List<Boolean> positive, boolean co
    *     the result is not complete
    * @param candidates Hz, ascending, inside the band
    */
-  public static SignChanges find(DoubleUnaryOperator value, double[] candidates, Band band) {
+  static SignChanges find(DoubleUnaryOperator value, double[] candidates, Band band) {
     return new Search(value).run(candidates, band);
   }
 
