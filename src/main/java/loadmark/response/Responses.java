@@ -1,5 +1,8 @@
 package loadmark.response;
 
+import java.util.List;
+import loadmark.equation.Equations;
+import loadmark.network.Load;
 import loadmark.network.Network;
 import loadmark.network.Port;
 
@@ -12,6 +15,13 @@ public final class Responses {
     if (!network.ports().contains(port)) {
       throw new IllegalArgumentException("no port " + port.name() + " in " + network.title());
     }
-    return (loads, against) -> new DenseComparison(network, port, loads, against);
+    Equations equations = Equations.of(network, port, false);
+    Equations atDc = Equations.of(network, port, true);
+    return new PortResponse() {
+      @Override
+      public Comparison compare(List<Load> loads, List<Load> against) {
+        return new SolvedComparison(equations, atDc, List.copyOf(loads), List.copyOf(against));
+      }
+    };
   }
 }

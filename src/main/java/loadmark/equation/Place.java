@@ -1,0 +1,29 @@
+package loadmark.equation;
+
+import java.util.ArrayList;
+import java.util.List;
+import loadmark.network.Load;
+
+/**
+ * Two nodes where loads go: all shunt loads across them, or all series loads between them.
+ *
+ * @param loads those that go here, in the network's order
+ * @param laws the law of each
+ */
+record Place(int first, int second, boolean series, List<Load> loads, List<Law> laws) {
+
+  /** What stands here with these loads on: open, or a join, with none. */
+  Law with(List<Load> on) {
+    List<Law> present = new ArrayList<>(laws.size());
+    for (int i = 0; i < laws.size(); i++) {
+      if (on.contains(loads.get(i))) {
+        present.add(laws.get(i));
+      }
+    }
+    return series ? Law.series(present) : Law.parallel(present);
+  }
+
+  boolean isAt(int a, int b, boolean inSeries) {
+    return series == inSeries && ((first == a && second == b) || (first == b && second == a));
+  }
+}
