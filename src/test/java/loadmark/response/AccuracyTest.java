@@ -2,74 +2,99 @@ package loadmark.response;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.util.ArrayList;
-import java.util.List;
-import java.util.Random;
+import java.util.Arrays;
+import loadmark.response.RandomCircuits.Range;
+import loadmark.response.RandomCircuits.Sample;
 import org.apfloat.Apcomplex;
-import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
 
+/** The engine against arbitrary precision on random networks. */
 class AccuracyTest {
-  static double decade(Random random, double from, double to) {
-    return from * Math.pow(to / from, random.nextDouble());
+  private static final double UNIT = 0x1p-53;
+
+  /** What is promised of Z, in units of κ·2⁻⁵³. */
+  private static final double IMPEDANCE_BOUND = 1000;
+
+  /** What is promised of the change, beside its own conditioning. */
+  private static final double CHANGE_BOUND = 1e-9;
+
+  /** How far above the true error (or one rounding) an estimate may typically be. */
+  private static final double TYPICAL_EXCESS = 1000;
+
+  /** Smaller changes are far below anything that is judged. */
+  private static final double LEAST_CHANGE = 1e-30;
+
+  private static final int SAMPLE = 150;
+  private static final int ALL = 2000;
+
+  @ParameterizedTest
+  @EnumSource
+  void aSampleIsWithinItsBounds(Range range) {
+    check(range, 1, SAMPLE);
   }
-  static loadmark.network.OnePort element(Random random, boolean extreme) {
-    int k = random.nextInt(3);
-    if (extreme) return k == 0 ? Circuit.r(decade(random, 1e-3, 1e9)) : k == 1 ? Circuit.c(decade(random, 1e-15, 1e-3)) : Circuit.l(decade(random, 1e-10, 1));
-    return k == 0 ? Circuit.r(decade(random, 10, 1e5)) : k == 1 ? Circuit.c(decade(random, 1e-11, 1e-7)) : Circuit.l(decade(random, 1e-7, 1e-2));
+
+  @ParameterizedTest
+  @EnumSource
+  @Tag("thorough")
+  void allAreWithinTheirBounds(Range range) {
+    check(range, 1_000, ALL);
   }
-  static Circuit random(Random random, boolean extreme) {
-    Circuit circuit = new Circuit();
-    int n = 2 + random.nextInt(12);
-    for (int i = 1; i < n; i++) circuit.part(i, i + 1, element(random, extreme));
-    for (int i = 1; i <= n; i++) if (i==n || random.nextInt(3) > 0) circuit.part(i, 0, element(random, extreme));
-    if (random.nextBoolean()) for (int i = 0; i < n / 2; i++) { int a = random.nextInt(n + 1), b = random.nextInt(n + 1); if (a != b) circuit.part(a, b, element(random, extreme)); }
-    circuit.port(1, 0);
-    int loads = 1 + random.nextInt(2);
-    for (int i = 0; i < loads; i++) {
-      int a = 1 + random.nextInt(n), b = random.nextInt(4) == 0 ? random.nextInt(n + 1) : 0;
-      if (a != b) circuit.shunt(a, b, Circuit.parallel(element(random, extreme), element(random, extreme)));
-      else circuit.shunt(a, 0, element(random, extreme));
-    }
-    return circuit;
-  }
-  @Test
-  void sample() {
-    for (boolean extreme : new boolean[] {false, true}) {
-      double worstZ = 0, worstH = 0, worstRatio = 0; List<Double> over = new ArrayList<>(), overH = new ArrayList<>(); int undetermined = 0;
-      long t0 = 0; long oracle = 0;
-      int count = Integer.getInteger("count", 100);
-      int below = 0;
-      for (int seed = 0; seed < count; seed++) {
-        Random random = new Random(seed);
-        Circuit circuit = random(random, extreme);
-        double hz = extreme ? decade(random, 0.1, 1e10) : decade(random, 1e2, 1e7);
-        Loading at = circuit.compare().at(hz);
-        long t = System.nanoTime();
-        ExactNetwork without = new ExactNetwork(circuit.network(), List.of(), hz);
-        ExactNetwork with = new ExactNetwork(circuit.network(), circuit.network().loads(), hz);
-        Apcomplex z = without.solve();
-        Apcomplex zl = with.solve();
-        oracle += System.nanoTime() - t;
-        double k = without.condition(z);
-        double kl = with.condition(zl);
-        if (!at.without().isFinite() || !at.with().isFinite() || !at.change().isFinite()) { undetermined++; System.out.println("seed " + seed + " " + at); continue; }
-        double e = error(z, at.without().re(), at.without().im());
-        double el = error(zl, at.with().re(), at.with().im());
-        Apcomplex h = zl.divide(z).subtract(new Apcomplex(new org.apfloat.Apfloat(1, 110)));
-        double eh = error(h, at.change().re(), at.change().im());
-        worstZ = Math.max(worstZ, Math.max(e / k, el / kl) / 0x1p-53);
-        worstH = Math.max(worstH, eh);
-        double unit = 0x1p-53;
-        over.add(at.withoutError() / Math.max(e, unit)); over.add(at.withError() / Math.max(el, unit)); overH.add(at.changeError() / Math.max(eh, unit));
-        if (e > at.withoutError() || el > at.withError() || eh > at.changeError()) { below++; System.out.println("BELOW seed " + seed + " e " + e + " " + el + " " + eh + " at " + at+" k "+k+" "+kl); }
-        if (eh > 1e-9 || e > 1000 * k * unit) System.out.println("BAD seed " + seed + " hz " + hz + " e " + e + " " + el + " " + eh + " k " + k + " " + kl + " H " + ExactNetwork.abs(h) + " " + at);
+
+  private static void check(Range range, long firstSeed, int count) {
+    double[] excess = new double[3 * count];
+    double worst = 0;
+    double worstChange = 0;
+    for (int i = 0; i < count; i++) {
+      long seed = firstSeed + i;
+      String which = range + " seed " + seed;
+      Sample sample = RandomCircuits.of(seed, range);
+      Loading found = sample.circuit().compare(sample.with(), sample.without()).at(sample.hz());
+      ExactNetwork bare =
+          new ExactNetwork(sample.circuit().network(), sample.without(), sample.hz());
+      ExactNetwork loaded =
+          new ExactNetwork(sample.circuit().network(), sample.with(), sample.hz());
+      Apcomplex without = bare.solve();
+      Apcomplex with = loaded.solve();
+      assertThat(found.without().isFinite() && found.with().isFinite()).as(which).isTrue();
+      assertThat(found.change().isFinite()).as(which).isTrue();
+      double error = ExactNetwork.error(without, found.without().re(), found.without().im());
+      double condition = bare.condition(without);
+      assertThat(error).as(which).isLessThanOrEqualTo(IMPEDANCE_BOUND * condition * UNIT);
+      assertThat(error).as(which).isLessThanOrEqualTo(found.withoutError());
+      worst = Math.max(worst, error / condition / UNIT);
+      excess[3 * i] = found.withoutError() / Math.max(error, UNIT);
+
+      error = ExactNetwork.error(with, found.with().re(), found.with().im());
+      condition = loaded.condition(with);
+      assertThat(error).as(which).isLessThanOrEqualTo(IMPEDANCE_BOUND * condition * UNIT);
+      assertThat(error).as(which).isLessThanOrEqualTo(found.withError());
+      worst = Math.max(worst, error / condition / UNIT);
+      excess[3 * i + 1] = found.withError() / Math.max(error, UNIT);
+
+      Apcomplex change = with.divide(without).subtract(Apcomplex.ONE);
+      error = ExactNetwork.error(change, found.change().re(), found.change().im());
+      if (ExactNetwork.abs(change) > LEAST_CHANGE) {
+        double own = IMPEDANCE_BOUND * bare.conditionOfChange(loaded, without, with) * UNIT;
+        assertThat(error).as(which).isLessThanOrEqualTo(CHANGE_BOUND + own);
+        excess[3 * i + 2] = found.changeError() / Math.max(error, UNIT);
+        worstChange = Math.max(worstChange, error);
+        assertThat(error).as(which).isLessThanOrEqualTo(found.changeError());
+      } else {
+        assertThat(found.change().magnitude()).as(which).isLessThan(2 * LEAST_CHANGE);
       }
-      over.sort(null); overH.sort(null);
-      System.out.printf("extreme %s: worst Z error/(k u) %.3g worst H error %.3g below %d undetermined %d; over Z median %.3g p90 %.3g max %.3g; H %.3g %.3g %.3g; oracle %.1f ms each%n", extreme, worstZ, worstH, below, undetermined, over.get(over.size()/2), over.get(over.size()*9/10), over.get(over.size()-1), overH.get(overH.size()/2), overH.get(overH.size()*9/10), overH.get(overH.size()-1), oracle/1e6/count);
     }
-  }
-  static double error(Apcomplex exact, double re, double im) {
-    Apcomplex d = new Apcomplex(ExactNetwork.exact(re), ExactNetwork.exact(im)).subtract(exact);
-    return ExactNetwork.abs(exact) == 0 ? ExactNetwork.abs(d) : ExactNetwork.abs(d.divide(exact));
+    Arrays.sort(excess);
+    assertThat(excess[excess.length / 2]).as("median excess").isLessThan(TYPICAL_EXCESS);
+    System.out.printf(
+        "%s: worst Z %.3g κu, worst change %.3g, estimate over error: median %.3g, 9 of 10 %.3g,"
+            + " 99 of 100 %.3g%n",
+        range,
+        worst,
+        worstChange,
+        excess[excess.length / 2],
+        excess[excess.length * 9 / 10],
+        excess[excess.length * 99 / 100]);
   }
 }
