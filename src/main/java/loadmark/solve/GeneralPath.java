@@ -350,7 +350,7 @@ final class GeneralPath {
     }
     error *= MARGIN;
     if (change.size() <= error) {
-      to.set(0, 0, 0, error == 0 ? 0 : Double.POSITIVE_INFINITY);
+      to.set(0, 0, 0, network.places().isEmpty() ? 0 : Double.POSITIVE_INFINITY);
     } else {
       double relative = FINAL_ROUNDING + error / change.size() + relative(with) * MARGIN;
       write(change.over(with.answer()).negate(), relative, to);

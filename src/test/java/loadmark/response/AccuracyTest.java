@@ -8,7 +8,7 @@ import loadmark.response.RandomCircuits.Sample;
 import org.apfloat.Apcomplex;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.EnumSource;
+import org.junit.jupiter.params.provider.MethodSource;
 
 /** The engine against arbitrary precision on random networks. */
 class AccuracyTest {
@@ -30,13 +30,13 @@ class AccuracyTest {
   private static final int ALL = 2000;
 
   @ParameterizedTest
-  @EnumSource
+  @MethodSource("loadmark.response.RandomCircuits$Range#both")
   void aSampleIsWithinItsBounds(Range range) {
     check(range, 1, SAMPLE);
   }
 
   @ParameterizedTest
-  @EnumSource
+  @MethodSource("loadmark.response.RandomCircuits$Range#both")
   @Tag("thorough")
   void allAreWithinTheirBounds(Range range) {
     check(range, 1_000, ALL);
@@ -48,7 +48,7 @@ class AccuracyTest {
     double worstChange = 0;
     for (int i = 0; i < count; i++) {
       long seed = firstSeed + i;
-      String which = range + " seed " + seed;
+      String which = range.name() + " seed " + seed;
       Sample sample = RandomCircuits.of(seed, range);
       Loading found = sample.circuit().compare(sample.with(), sample.without()).at(sample.hz());
       ExactNetwork bare =
@@ -90,7 +90,7 @@ class AccuracyTest {
     System.out.printf(
         "%s: worst Z %.3g κu, worst change %.3g, estimate over error: median %.3g, 9 of 10 %.3g,"
             + " 99 of 100 %.3g%n",
-        range,
+        range.name(),
         worst,
         worstChange,
         excess[excess.length / 2],

@@ -239,7 +239,7 @@ final class ExactNetwork {
    */
   double conditionOfChange(ExactNetwork loaded, Apcomplex z, Apcomplex loadedZ) {
     Apcomplex ratio = loadedZ.divide(z);
-    Map<OnePort, Apcomplex> slopes = new IdentityHashMap<>();
+    IdentityHashMap<OnePort, Apcomplex> slopes = new IdentityHashMap<>();
     gather(slopes, z, ratio);
     loaded.gather(slopes, loadedZ, ratio.negate());
     double sum = 0;
@@ -249,7 +249,7 @@ final class ExactNetwork {
     return 2 * sum;
   }
 
-  private void gather(Map<OnePort, Apcomplex> slopes, Apcomplex z, Apcomplex by) {
+  private void gather(IdentityHashMap<OnePort, Apcomplex> slopes, Apcomplex z, Apcomplex by) {
     for (Share share : shares) {
       Apcomplex across = volts[share.a].subtract(volts[share.b]);
       Apcomplex slope = share.slope.multiply(across).multiply(across).divide(z).multiply(by);

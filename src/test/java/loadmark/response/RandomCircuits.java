@@ -9,15 +9,28 @@ import loadmark.network.OnePort;
 /** Seeded random ladders and bridged networks with shunt and series loads, and cases of them. */
 final class RandomCircuits {
 
-  /** How far apart the values are. */
-  enum Range {
-    MILD(10, 1e5, 1e-11, 1e-7, 1e-7, 1e-2, 1e2, 1e7),
-    EXTREME(1e-3, 1e9, 1e-15, 1e-3, 1e-10, 1, 0.1, 1e10);
+  /** How far apart values may be. */
+  record Span(double from, double to) {}
 
-    final double[] bounds;
+  /** How far apart the values are: Ω, F, H, Hz. */
+  record Range(String name, Span ohm, Span farad, Span henry, Span hz) {
+    static final Range MILD =
+        new Range(
+            "mild",
+            new Span(10, 1e5),
+            new Span(1e-11, 1e-7),
+            new Span(1e-7, 1e-2),
+            new Span(1e2, 1e7));
+    static final Range EXTREME =
+        new Range(
+            "extreme",
+            new Span(1e-3, 1e9),
+            new Span(1e-15, 1e-3),
+            new Span(1e-10, 1),
+            new Span(0.1, 1e10));
 
-    Range(double... bounds) {
-      this.bounds = bounds;
+    static Range[] both() {
+      return new Range[] {MILD, EXTREME};
     }
   }
 
@@ -28,11 +41,11 @@ final class RandomCircuits {
   private static final int MOST_LOADS = 3;
 
   private final Random random;
-  private final double[] bounds;
+  private final Range range;
 
   private RandomCircuits(Random random, Range range) {
     this.random = random;
-    bounds = range.bounds;
+    this.range = range;
   }
 
   static Sample of(long seed, Range range) {
@@ -68,7 +81,7 @@ final class RandomCircuits {
       circuit.shunt(a, random.nextInt(3) == 0 ? other(a, nodes) : 0, load());
     }
     circuit.port(1, random.nextInt(4) == 0 ? other(1, nodes) : 0);
-    return chooseCase(circuit, decade(6));
+    return chooseCase(circuit, of(range.hz));
   }
 
   private Sample chooseCase(Circuit circuit, double hz) {
@@ -101,13 +114,14 @@ final class RandomCircuits {
 
   private OnePort element() {
     return switch (random.nextInt(3)) {
-      case 0 -> Circuit.r(decade(0));
-      case 1 -> Circuit.c(decade(2));
-      default -> Circuit.l(decade(4));
+      case 0 -> Circuit.r(of(range.ohm));
+      case 1 -> Circuit.c(of(range.farad));
+      default -> Circuit.l(of(range.henry));
     };
   }
 
-  private double decade(int bound) {
-    return bounds[bound] * Math.pow(bounds[bound + 1] / bounds[bound], random.nextDouble());
+  /** Evenly spread over the decades. */
+  private double of(Span span) {
+    return span.from * Math.pow(span.to / span.from, random.nextDouble());
   }
 }
