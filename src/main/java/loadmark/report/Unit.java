@@ -17,7 +17,7 @@ enum Unit {
   DECIBEL;
 
   /** A bound shows so many digits at most: rounding of unit conversions stays hidden. */
-  static final int MOST_BOUND_DIGITS = 12;
+  static final int MOST_BOUND_DIGITS = 6;
 
   /** The unit of {@link loadmark.judge.Worst#value()}, or that of the only bound in Ω. */
   static Unit of(Limit limit) {

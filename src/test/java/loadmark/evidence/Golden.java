@@ -21,7 +21,7 @@ final class Golden {
   /** What the tool promises for its values, relative. */
   private static final double PROMISE = 1e-9;
 
-  /** The place of a flat worst value is right to the root of what its value is. */
+  /** The place of a flat worst value, and the impedances there, are right to the root of that. */
   private static final double FLAT = 1e-6;
 
   /** Below this a value is a rounding of zero. */
@@ -61,7 +61,7 @@ final class Golden {
     assertThat(actual.size()).as(where).isEqualTo(expected.size());
     if (expected.isNumber()) {
       double value = expected.asDouble();
-      boolean place = where.endsWith("/worst/hz") || where.endsWith("/worst_hz");
+      boolean place = where.contains("worst") && !where.matches(".*/(value|value_ohm|worst)");
       double tolerance = Math.abs(value) * (place ? FLAT : PROMISE) + ZERO;
       assertThat(actual.asDouble()).as(where).isCloseTo(value, within(tolerance));
     } else if (expected.isObject()) {

@@ -2,9 +2,9 @@ package loadmark.response;
 
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.LinkedHashMap;
 import java.util.Set;
 import loadmark.network.Load;
 import loadmark.network.Network;
@@ -12,8 +12,8 @@ import loadmark.network.Node;
 import loadmark.network.OnePort;
 import loadmark.network.Part;
 import org.apfloat.Apcomplex;
-import org.apfloat.Apfloat;
 import org.apfloat.ApcomplexMath;
+import org.apfloat.Apfloat;
 import org.apfloat.ApfloatMath;
 
 /**
