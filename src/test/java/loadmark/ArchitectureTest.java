@@ -27,6 +27,7 @@ class ArchitectureTest {
       Map.ofEntries(
           entry("quantity", List.of()),
           entry("diagnostic", List.of()),
+          entry("touchstone", List.of("diagnostic", "quantity")),
           entry("syntax", List.of("diagnostic", ANTLR)),
           entry("network", List.of("quantity")),
           entry("binding", List.of("diagnostic", "quantity", "syntax", "network", JGRAPHT)),
@@ -48,7 +49,15 @@ class ArchitectureTest {
                   "judge")),
           entry(
               "report",
-              List.of("diagnostic", "study", "judge", "response", "network", "quantity", JACKSON)),
+              List.of(
+                  "diagnostic",
+                  "study",
+                  "judge",
+                  "response",
+                  "network",
+                  "quantity",
+                  "touchstone",
+                  JACKSON)),
           entry("cli", List.of("study", "report", "diagnostic", PICOCLI)));
 
   @TestFactory

@@ -67,7 +67,7 @@ final class Arguments {
     checkFiles(name, files);
     Manner manner =
         new Manner(
-            format(find(command, Options.FORMAT)),
+            format(name, find(command, Options.FORMAT)),
             find(command, Options.OUTPUT),
             command.hasMatchedOption(Options.QUIET),
             command.hasMatchedOption(Options.NO_COLOR));
@@ -106,21 +106,25 @@ final class Arguments {
     }
   }
 
-  private Format format(Optional<String> word) {
+  private Format format(String command, Optional<String> word) {
     if (word.isEmpty()) {
       return Format.TEXT;
     }
     Optional<Format> format = Format.find(word.get());
     if (format.isEmpty()) {
-      String hint =
-          Nearest.find(word.get(), Format.words())
-              .map(n -> "did you mean `" + n + "`?")
-              .orElse("--format takes " + String.join(", ", Format.words()));
       findings.error(
           "unknown-format",
           text.place(Options.FORMAT),
           "there is no format `" + word.get() + "`",
-          hint);
+          Nearest.find(word.get(), Format.words(command))
+              .map(n -> "did you mean `" + n + "`?")
+              .orElse("--format takes " + String.join(", ", Format.words(command))));
+    } else if (!format.get().isOf(command)) {
+      findings.error(
+          "unknown-format",
+          text.place(Options.FORMAT),
+          command + " has no format `" + word.get() + "`",
+          "--format " + word.get() + " belongs to " + Options.CURVE);
     }
     return format.orElse(Format.TEXT);
   }

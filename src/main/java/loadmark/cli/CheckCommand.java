@@ -56,6 +56,7 @@ final class CheckCommand {
               : CheckText.write(results, asked.request().options(), style);
       case JSON -> CheckJson.write(results, findings.sorted(), asked.request().options());
       case CSV -> CheckCsv.write(results);
+      case S1P -> throw new IllegalStateException("a verdict has no such format");
     };
   }
 }

@@ -6,6 +6,7 @@ import loadmark.diagnostic.Findings;
 import loadmark.report.CurveCsv;
 import loadmark.report.CurveJson;
 import loadmark.report.CurveText;
+import loadmark.report.CurveTouchstone;
 import loadmark.study.CurveTable;
 import loadmark.study.Outcome;
 import loadmark.study.Source;
@@ -28,7 +29,8 @@ final class CurveCommand {
   Outcome run() {
     Findings findings = new Findings();
     Optional<Source> source = inputs.read(asked.file(), findings);
-    Optional<CurveTable> table = source.flatMap(s -> study.curve(s, findings));
+    Optional<CurveTable> table =
+        source.flatMap(s -> study.curve(s, findings).filter(t -> canWrite(s, t, findings)));
     Delivery delivery = new Delivery(asked.manner(), List.of(asked.file()), streams);
     delivery.tell(findings.sorted());
     Findings undelivered = new Findings();
@@ -39,6 +41,11 @@ final class CurveCommand {
       return Outcome.INVALID;
     }
     return table.get().countUndetermined() > 0 ? Outcome.UNDETERMINED : Outcome.KEPT;
+  }
+
+  private boolean canWrite(Source source, CurveTable table, Findings findings) {
+    return asked.manner().format() != Format.S1P
+        || CurveTouchstone.canHold(source.text(), table, findings);
   }
 
   private String write(
@@ -52,6 +59,7 @@ final class CurveCommand {
               .map(t -> CurveText.write(asked.file(), t, Terminal.style(asked.manner())))
               .orElse("");
       case CSV -> table.map(CurveCsv::write).orElse("");
+      case S1P -> table.map(t -> CurveTouchstone.write(asked.file(), t)).orElse("");
       case JSON -> {
         undelivered.sorted().forEach(findings::add);
         yield CurveJson.write(

@@ -8,7 +8,8 @@ import java.util.Optional;
 enum Format {
   TEXT("text"),
   JSON("json"),
-  CSV("csv");
+  CSV("csv"),
+  S1P("s1p");
 
   private final String word;
 
@@ -20,7 +21,12 @@ enum Format {
     return Arrays.stream(values()).filter(f -> f.word.equals(word)).findFirst();
   }
 
-  static List<String> words() {
-    return Arrays.stream(values()).map(f -> f.word).toList();
+  /** Those that a command has. */
+  static List<String> words(String command) {
+    return Arrays.stream(values()).filter(f -> f.isOf(command)).map(f -> f.word).toList();
+  }
+
+  boolean isOf(String command) {
+    return this != S1P || command.equals(Options.CURVE);
   }
 }

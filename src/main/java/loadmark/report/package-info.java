@@ -1,4 +1,4 @@
-/** Judgements to text, JSON and CSV. */
+/** Judgements to text, JSON and CSV, curves to these and to the Touchstone open format. */
 @NullMarked
 package loadmark.report;
 

@@ -35,7 +35,7 @@ class HelpTest {
                         command.getCommandSpec().options().stream()
                             .map(OptionSpec::longestName)
                             .toList())
-                    .contains(Format.words()));
+                    .contains(Format.words(name)));
   }
 
   @Test
