@@ -109,6 +109,9 @@ final class LineReader {
         Words.declares(word) && line.size() > 1 && Words.isName(line.get(1))
             ? Optional.of(names.read(line.get(1)))
             : Optional.empty();
+    if (!known && Words.isName(line.get(0))) {
+      mentioned.add(names.read(line.get(0)));
+    }
     return new Statement.Broken(known ? word : "", declared, mentioned, places.firstLine(line));
   }
 }
