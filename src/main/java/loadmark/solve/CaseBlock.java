@@ -237,14 +237,17 @@ final class CaseBlock {
     to.copy(z.re, z.im, from, n);
     double[] error = to.error();
     if (error != null) {
-      judge(y, y, lost, given, error, from, n, doubtful);
+      judge(y, y, 0, lost, given, error, from, n, doubtful);
     }
   }
 
-  /** The relative error of a number and whether it is small enough. */
+  /**
+   * The relative error of a number, and whether it is small enough or the result next to nothing.
+   */
   private static void judge(
       Tracked what,
       Tracked result,
+      double nothing,
       double[] lost,
       double[] given,
       double[] error,
@@ -256,7 +259,7 @@ final class CaseBlock {
       double sum = (lost[i] + given[i]) / abs;
       error[from + i] = (QUOTIENT + what.error[i] + 1.5 * sum) * UNIT;
       boolean good = lost[i] <= MOST_GROWTH * (given[i] + abs) && error[from + i] <= MOST_ERROR;
-      good |= Math.abs(result.re[i]) + Math.abs(result.im[i]) < NO_CHANGE;
+      good |= Math.abs(result.re[i]) + Math.abs(result.im[i]) < nothing;
       doubtful[from + i] |= !good;
     }
   }
@@ -271,7 +274,7 @@ final class CaseBlock {
     to.change().copy(ratio.re, ratio.im, from, n);
     double[] error = to.change().error();
     if (error != null) {
-      judge(fall, ratio, stars.change, elements.change, error, from, n, doubtful);
+      judge(fall, ratio, NO_CHANGE, stars.change, elements.change, error, from, n, doubtful);
       for (int i = from; i < from + n; i++) {
         error[i] += to.with().error(i);
       }

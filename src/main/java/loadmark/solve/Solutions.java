@@ -74,6 +74,9 @@ public record Solutions(Quantity without, Quantity with, Quantity change) {
       re = new double[size];
       im = new double[size];
       error = estimates ? new double[size] : null;
+      if (error != null) {
+        Arrays.fill(error, Double.POSITIVE_INFINITY);
+      }
     }
 
     /** What is known at a frequency. */
