@@ -18,9 +18,11 @@ public interface Crossings {
 
   /**
    * Every frequency of the band where the criterion may have the level, and some where it has not:
-   * points where it comes near, and those where it has the opposite value. A candidate is right to
-   * about 1e-12 of itself, one of a close pair to about 1e-7 of itself. What happens between
-   * neighbouring candidates, and at them, is for the accurate responses to say.
+   * points where it comes near, and those where it has the opposite value. A lone candidate is
+   * right to about 1e-12 of itself, one of a close pair to rounding over their distance, and where
+   * the change is below 1e-8 and poles with and without the loads all but coincide, to about 1e-5.
+   * What happens between neighbouring candidates, and at them, is for the accurate responses to
+   * say.
    *
    * @param band positive frequencies
    * @return Hz, ascending, inside the band; empty where the criterion is constant
