@@ -31,6 +31,21 @@ public interface Crossings {
    */
   double[] candidates(Level level, Band band);
 
+  /** No algebraic answer, and why. */
+  static Crossings none(String why) {
+    return new Crossings() {
+      @Override
+      public Optional<String> findObstacle() {
+        return Optional.of(why);
+      }
+
+      @Override
+      public double[] candidates(Level level, Band band) {
+        throw new IllegalStateException(why);
+      }
+    };
+  }
+
   /** The crossings of one port with one set of loads against another. */
   static Crossings of(Network network, Port port, List<Load> loads, List<Load> against) {
     return new AlgebraicCrossings(network, port, loads, against);

@@ -26,6 +26,11 @@ public final class Responses {
       public Comparison compare(List<Load> loads, List<Load> against) {
         return new SolvedComparison(equations, atDc, List.copyOf(loads), List.copyOf(against));
       }
+
+      @Override
+      public Crossings crossings(List<Load> loads, List<Load> against) {
+        return Crossings.of(network, port, loads, against);
+      }
     };
   }
 }
