@@ -77,14 +77,28 @@ final class Arguments {
             name.equals(Options.CURVE) ? find(command, Options.AT) : Optional.empty(),
             command.matchedOptionValue(Options.SET, List.of()),
             find(command, Options.PORT),
-            find(command, Options.CASE));
+            find(command, Options.CASE),
+            name.equals(Options.CURVE) && command.hasMatchedOption(Options.POLES));
+    checkPoles(request, manner);
     if (findings.hasErrors()) {
       return Optional.empty();
     }
     return Optional.of(
-        name.equals(Options.CHECK)
-            ? new Invocation.Check(files, request, manner)
-            : new Invocation.Curve(files.get(0), request, manner));
+        switch (name) {
+          case Options.CURVE -> new Invocation.Curve(files.get(0), request, manner);
+          case Options.ALLOW -> new Invocation.Allow(files.get(0), request, manner);
+          default -> new Invocation.Check(files, request, manner);
+        });
+  }
+
+  private void checkPoles(Request request, Manner manner) {
+    if (request.poles() && manner.format() != Format.TEXT && manner.format() != Format.JSON) {
+      findings.error(
+          "poles-in-format",
+          text.place(Options.POLES),
+          "format " + manner.format().word() + " has no room for poles and zeros",
+          "take --format json, or text");
+    }
   }
 
   private static Optional<String> find(ParseResult command, String option) {
@@ -98,8 +112,8 @@ final class Arguments {
           text.place(command),
           command + " needs a FILE",
           "a network file, or - for standard input");
-    } else if (command.equals(Options.CURVE) && files.size() > 1) {
-      findings.error("too-many-files", text.place(files.get(1)), "curve takes one FILE alone");
+    } else if (!command.equals(Options.CHECK) && files.size() > 1) {
+      findings.error("too-many-files", text.place(files.get(1)), command + " takes one FILE alone");
     } else if (files.stream().filter(STANDARD_INPUT::equals).count() > 1) {
       findings.error(
           "stdin-twice", text.place(STANDARD_INPUT), "standard input can be read only once");

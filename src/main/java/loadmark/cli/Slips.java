@@ -103,7 +103,9 @@ final class Slips {
   }
 
   private static Optional<String> other(String option) {
-    return option.equals(Options.AT) ? Optional.of("--at belongs to curve") : Optional.empty();
+    return option.equals(Options.AT) || option.equals(Options.POLES)
+        ? Optional.of(option + " belongs to curve")
+        : Optional.empty();
   }
 
   private static String name(ArgSpec spec) {

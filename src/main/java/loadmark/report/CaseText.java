@@ -64,7 +64,7 @@ final class CaseText {
   }
 
   /** On one line, safe to show. */
-  private static String clean(String text) {
+  static String clean(String text) {
     StringBuilder line = new StringBuilder();
     for (int i = 0; i < text.length(); i++) {
       char c = text.charAt(i);
