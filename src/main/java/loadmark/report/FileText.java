@@ -99,7 +99,7 @@ final class FileText {
 
   private void writeGlance() {
     boolean ports = judgement.network().ports().size() > 1;
-    Columns columns = new Columns("llrllll");
+    Columns columns = new Columns("nnrllll");
     columns.add(ports ? "port" : "", "case", "line", "limit", "worst", "at", "allowed");
     for (CaseJudgement one : judgement.cases()) {
       String port = ports ? Visible.of(one.port().name()) : "";
@@ -127,7 +127,7 @@ final class FileText {
         name,
         Integer.toString(limit.line()),
         limit.criterion().words(),
-        worst.map(w -> Values.worst(limit, w)).orElse("–"),
+        worst.map(w -> Values.easierWorst(limit, w)).orElse("–"),
         worst.map(w -> Impedances.frequency(w.hz())).orElse("–"),
         Values.shortBound(limit));
   }

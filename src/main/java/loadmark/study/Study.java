@@ -64,6 +64,7 @@ public final class Study {
         .orElse(List.of())
         .stream()
         .mapToDouble(Double::doubleValue)
+        .distinct()
         .toArray();
   }
 
