@@ -9,7 +9,7 @@ final class Columns {
   private static final int GAP = 2;
 
   /** A column is not cut below this. */
-  private static final int LEAST = 6;
+  private static final int LEAST = 4;
 
   private final List<String[]> rows = new ArrayList<>();
   private final String alignment;
