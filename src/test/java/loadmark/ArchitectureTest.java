@@ -35,6 +35,7 @@ class ArchitectureTest {
           entry("solve", List.of("equation", EJML)),
           entry("response", List.of("network", "equation", "solve", EJML, COMMONS_MATH)),
           entry("judge", List.of("network", "response", COMMONS_MATH)),
+          entry("allowance", List.of("network", "response", "judge", COMMONS_MATH)),
           entry(
               "study",
               List.of(
@@ -46,17 +47,20 @@ class ArchitectureTest {
                   "equation",
                   "solve",
                   "response",
-                  "judge")),
+                  "judge",
+                  "allowance")),
           entry(
               "report",
               List.of(
                   "diagnostic",
                   "study",
+                  "allowance",
                   "judge",
                   "response",
                   "network",
                   "quantity",
                   "touchstone",
+                  COMMONS_MATH,
                   JACKSON)),
           entry("cli", List.of("study", "report", "diagnostic", PICOCLI)));
 

@@ -209,13 +209,16 @@ public final class Binder {
     }
     Statement.Closure.Driven driven = (Statement.Closure.Driven) closure.get();
     OptionalDouble volts = values.read(driven.volts(), Expected.VOLTAGE);
+    if (volts.isEmpty()) {
+      return new Port.Closure.Open();
+    }
     Port.DriveKind kind =
         switch (driven.kind()) {
           case RMS -> Port.DriveKind.RMS;
           case PEAK -> Port.DriveKind.PEAK;
           case DC -> Port.DriveKind.DC;
         };
-    Port.Drive drive = new Port.Drive(volts.orElse(0), kind, driven.mains());
+    Port.Drive drive = new Port.Drive(volts.getAsDouble(), kind, driven.mains());
     return driven.behind().isEmpty()
         ? new Port.Closure.Shorted(drive)
         : new Port.Closure.Driven(

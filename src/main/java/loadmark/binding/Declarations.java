@@ -25,6 +25,7 @@ final class Declarations {
   private final Set<String> nodes = new HashSet<>();
   private final Set<String> doubtful = new HashSet<>();
   private final Set<String> brokenWords = new HashSet<>();
+  private final Set<String> brokenParts = new HashSet<>();
   private boolean namelessPart;
   private boolean loadLine;
 
@@ -54,6 +55,9 @@ final class Declarations {
         }
       } else if (statement instanceof Statement.Broken broken) {
         all.brokenWords.add(broken.word());
+        if (isPartWord(broken.word())) {
+          broken.declared().ifPresent(name -> all.brokenParts.add(name.text()));
+        }
         all.namelessPart |= broken.declared().isEmpty() && isPartWord(broken.word());
         broken.declared().ifPresent(name -> all.doubtful.add(name.text()));
         broken.mentioned().forEach(name -> all.doubtful.add(name.text()));
@@ -132,6 +136,11 @@ final class Declarations {
   /** Whether the file has a load's line, were its name taken. */
   boolean hasLoadLine() {
     return loadLine;
+  }
+
+  /** Whether a part has this name, were its value unreadable. */
+  boolean isPart(String name) {
+    return parts.containsKey(name) || brokenParts.contains(name);
   }
 
   /** Whether a part's statement could not be read so far as its name: any part may be that one. */

@@ -24,6 +24,7 @@ final class Limits {
   private final Map<String, Port> ports;
   private final Findings findings;
   private final Case bare = Case.bare();
+  private boolean missedLoad;
 
   /**
    * @param cases by name, in the order of judging, without {@code bare}
@@ -114,7 +115,11 @@ final class Limits {
     if (absolute) {
       return List.of(bare);
     }
-    if (!declared.hasLoadLine() && !declared.isBroken("load") && !declared.isBroken("case")) {
+    if (!missedLoad
+        && !declared.hasLoadLine()
+        && !declared.isBroken("load")
+        && !declared.isBroken("case")) {
+      missedLoad = true;
       findings.error(
           "no-load",
           line.span(),

@@ -1,6 +1,7 @@
 package loadmark.binding;
 
 import java.util.HashSet;
+import java.util.Set;
 import loadmark.diagnostic.Findings;
 import loadmark.network.Load;
 import loadmark.network.Load.Placement;
@@ -15,6 +16,7 @@ import org.jgrapht.alg.util.UnionFind;
 final class PortNodesCheck implements Check {
   @Override
   public void check(Draft draft, Findings findings) {
+    Set<Port> told = new HashSet<>();
     for (Port port : draft.ports()) {
       if (port.plus().equals(port.minus())) {
         report(findings, draft, port, "both nodes of the port are `" + port.plus().name() + "`");
@@ -49,7 +51,8 @@ final class PortNodesCheck implements Check {
       for (Port other : draft.ports()) {
         if (!other.equals(port)
             && other.closure() instanceof Port.Closure.Shorted
-            && joins(joined, port, other.plus(), other.minus())) {
+            && joins(joined, port, other.plus(), other.minus())
+            && told.add(other)) {
           report(
               findings,
               draft,

@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.Nearest;
@@ -80,13 +81,15 @@ final class UnknownNodes {
   }
 
   private void report(Findings findings, String whose, Name node) {
-    if (!isKnown(node.text())) {
+    Optional<String> near = Nearest.find(node.text(), known);
+    // A wire that could not be read may lead there; only a likely misspelling is then worth a word.
+    boolean excused = declared.isBroken("wire") && near.isEmpty();
+    if (!isKnown(node.text()) && !excused) {
       findings.error(
           "no-path",
           node.span(),
           "the node `" + node.text() + "` of " + whose + " has no path to the rest of the network",
-          Nearest.find(node.text(), known)
-              .map(near -> "did you mean `" + near + "`?")
+          near.map(word -> "did you mean `" + word + "`?")
               .orElse(
                   declared.parts().containsKey(node.text())
                       ? "`" + node.text() + "` is a part; name one of its nodes"

@@ -47,7 +47,7 @@ final class Values {
         } else if (Arithmetic.isFunction(name) || Declarations.isTaken(name)) {
           Declarations.reportTaken(findings, let.name());
         } else {
-          lets.put(name, overrides.getOrDefault(name, let.value()));
+          lets.put(name, let.value());
         }
       } else if (statement instanceof Statement.Broken broken && broken.word().equals("let")) {
         broken.declared().ifPresent(name -> brokenLets.add(name.text()));
@@ -55,7 +55,9 @@ final class Values {
     }
     overrides.forEach(
         (name, value) -> {
-          if (!lets.containsKey(name) && !brokenLets.contains(name)) {
+          if (lets.containsKey(name)) {
+            override(name, value);
+          } else if (!brokenLets.contains(name)) {
             findings.error(
                 "undefined-value",
                 value.span(),
@@ -65,6 +67,26 @@ final class Values {
                     .orElse("only a value that the file names with let can be set"));
           }
         });
+  }
+
+  /** Puts another value in the place of the file's, which must be of the same kind. */
+  private void override(String name, Expression value) {
+    Optional<Dimension> own = resolve(name).map(Quantity::dimension);
+    Optional<Dimension> other = evaluate(value).map(Quantity::dimension);
+    if (own.isPresent() && other.isPresent() && !own.equals(other)) {
+      findings.error(
+          isBareNumber(value) ? "missing-unit" : "wrong-dimension",
+          value.span(),
+          "this is "
+              + other.get().describe()
+              + "; in the file `"
+              + name
+              + "` is "
+              + own.get().describe());
+      return;
+    }
+    lets.put(name, value);
+    known.clear();
   }
 
   /** Works out every {@code let}, so that slips in unused ones are found too. */

@@ -44,7 +44,9 @@ final class Windows {
           "window-order",
           between.from().span().to(between.to().span()),
           "the window does not go from a lower to a higher value",
-          "put the lower one first");
+          expected.dimension().equals(Dimension.ANGLE)
+              ? "a window across 180 deg goes on counting: 170 deg to 190 deg"
+              : "put the lower one first");
       return Optional.empty();
     }
     return Optional.of(Bound.between(from.getAsDouble(), to.getAsDouble()));

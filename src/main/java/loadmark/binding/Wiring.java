@@ -91,27 +91,18 @@ final class Wiring {
         return;
       }
       if (!isPart(item) && (last || (isPart(items.get(i + 1)) && !isLikelyPart(item)))) {
-        reportSideBySide(items.get(i - 1), item);
+        if (i > 1 && isPart(items.get(i - 1))) {
+          reportPartsSideBySide(items.get(i - 2), items.get(i - 1));
+        } else {
+          reportSideBySide(items.get(i - 1), item);
+        }
         before = nodes.mention(item.name());
         i++;
         continue;
       }
       WireItem behind = items.get(i + 1);
       if (isForgottenNode(items, i)) {
-        findings.error(
-            "parts-side-by-side",
-            behind.span(),
-            "the parts `"
-                + item.name().text()
-                + "` and `"
-                + behind.name().text()
-                + "` stand side by side",
-            "name the node between them: … -- "
-                + item.name().text()
-                + " -- NODE -- "
-                + behind.name().text()
-                + " -- …");
-        doubtful = true;
+        reportPartsSideBySide(item, behind);
         excuseRest(items, i);
         return;
       }
@@ -123,7 +114,7 @@ final class Wiring {
   }
 
   private boolean isPart(WireItem item) {
-    return declared.parts().containsKey(item.name().text());
+    return declared.isPart(item.name().text());
   }
 
   /** Whether a name that is no part is a misspelt one, rather than a node. */
@@ -136,6 +127,15 @@ final class Wiring {
     unwired.removeAll(mentions.keySet());
     unwired.removeAll(places.keySet());
     return Nearest.find(name.text(), unwired);
+  }
+
+  /** The only part that no wire names, where there is one: most likely the one that is meant. */
+  private Optional<String> findOnlyUnwired() {
+    Set<String> unwired = new LinkedHashSet<>(declared.parts().keySet());
+    unwired.removeAll(mentions.keySet());
+    return unwired.size() == 1
+        ? unwired.stream().filter(name -> !places.containsKey(name)).findFirst()
+        : Optional.empty();
   }
 
   /** Whether node and part take turns from here, beginning with a node. */
@@ -167,6 +167,10 @@ final class Wiring {
           "a part with two terminals is wired by its name alone");
       doubtful = true;
       excused.add(name);
+      return;
+    }
+    if (isPart(item) && !declared.parts().containsKey(name)) {
+      doubtful = true;
       return;
     }
     if (!isPart(item)) {
@@ -212,7 +216,7 @@ final class Wiring {
       doubtful = true;
       return Optional.empty();
     }
-    Optional<String> near = findUnwiredNear(item.name());
+    Optional<String> near = findUnwiredNear(item.name()).or(this::findOnlyUnwired);
     if (near.isPresent()) {
       findings.error(
           "undeclared-part",
@@ -255,6 +259,17 @@ final class Wiring {
     doubtful = true;
   }
 
+  private void reportPartsSideBySide(WireItem first, WireItem second) {
+    String one = first.name().text();
+    String other = second.name().text();
+    findings.error(
+        "parts-side-by-side",
+        second.span(),
+        "the parts `" + one + "` and `" + other + "` stand side by side",
+        "name the node between them: … -- " + one + " -- NODE -- " + other + " -- …");
+    doubtful = true;
+  }
+
   private void excuseRest(List<WireItem> items, int from) {
     for (WireItem item : items.subList(from, items.size())) {
       excused.add(item.name().text());
@@ -282,7 +297,8 @@ final class Wiring {
   private void reportUnwired() {
     for (Statement.Part part : declared.parts().values()) {
       String name = part.name().text();
-      boolean excusedHere = excused.contains(name) || declared.isDoubtful(name);
+      boolean excusedHere =
+          declared.isBroken("wire") || excused.contains(name) || declared.isDoubtful(name);
       if (!places.containsKey(name) && !excusedHere) {
         findings.error(
             "unwired",

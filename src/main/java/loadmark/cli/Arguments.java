@@ -13,6 +13,7 @@ import picocli.CommandLine.ParseResult;
 /** Arguments to what they ask for; slips become findings in our own words. */
 final class Arguments {
   private static final String STANDARD_INPUT = "-";
+  private static final char REPLACEMENT = '\uFFFD';
 
   private final ArgumentText text;
   private final Findings findings;
@@ -25,12 +26,31 @@ final class Arguments {
   /** What is asked for; empty, with findings, where it makes no sense. */
   static Optional<Invocation> parse(String[] arguments, Findings findings) {
     ArgumentText text = new ArgumentText(arguments);
+    checkLocale(arguments, text, findings);
+    if (findings.hasErrors()) {
+      return Optional.empty();
+    }
     CommandLine commands = Options.commandLine();
     try {
       return new Arguments(text, findings).read(commands.parseArgs(arguments));
     } catch (ParameterException slip) {
       new Slips(text, findings).add(slip);
       return Optional.empty();
+    }
+  }
+
+  /**
+   * Where the locale is not UTF-8 this sign is all that arrives of a character it does not have.
+   */
+  private static void checkLocale(String[] arguments, ArgumentText text, Findings findings) {
+    for (String argument : arguments) {
+      if (argument.indexOf(REPLACEMENT) >= 0) {
+        findings.error(
+            "locale-not-utf8",
+            text.place(argument),
+            "characters of this argument are lost: the locale is not UTF-8",
+            "set LC_ALL=C.UTF-8, or write `ohm` for Ω and `u` for µ");
+      }
     }
   }
 
@@ -65,6 +85,9 @@ final class Arguments {
   private Optional<Invocation> read(String name, ParseResult command) {
     List<String> files = command.matchedPositionalValue(0, List.of());
     checkFiles(name, files);
+    if (find(command, Options.OUTPUT).filter(String::isEmpty).isPresent()) {
+      findings.error("empty-name", text.place(Options.OUTPUT), "--output needs a name");
+    }
     Manner manner =
         new Manner(
             format(name, find(command, Options.FORMAT)),
@@ -77,14 +100,28 @@ final class Arguments {
             name.equals(Options.CURVE) ? find(command, Options.AT) : Optional.empty(),
             command.matchedOptionValue(Options.SET, List.of()),
             find(command, Options.PORT),
-            find(command, Options.CASE));
+            find(command, Options.CASE),
+            name.equals(Options.CURVE) && command.hasMatchedOption(Options.POLES));
+    checkPoles(request, manner);
     if (findings.hasErrors()) {
       return Optional.empty();
     }
     return Optional.of(
-        name.equals(Options.CHECK)
-            ? new Invocation.Check(files, request, manner)
-            : new Invocation.Curve(files.get(0), request, manner));
+        switch (name) {
+          case Options.CURVE -> new Invocation.Curve(files.get(0), request, manner);
+          case Options.ALLOW -> new Invocation.Allow(files.get(0), request, manner);
+          default -> new Invocation.Check(files, request, manner);
+        });
+  }
+
+  private void checkPoles(Request request, Manner manner) {
+    if (request.poles() && manner.format() != Format.TEXT && manner.format() != Format.JSON) {
+      findings.error(
+          "poles-in-format",
+          text.place(Options.POLES),
+          "format " + manner.format().word() + " has no room for poles and zeros",
+          "take --format json, or text");
+    }
   }
 
   private static Optional<String> find(ParseResult command, String option) {
@@ -98,8 +135,10 @@ final class Arguments {
           text.place(command),
           command + " needs a FILE",
           "a network file, or - for standard input");
-    } else if (command.equals(Options.CURVE) && files.size() > 1) {
-      findings.error("too-many-files", text.place(files.get(1)), "curve takes one FILE alone");
+    } else if (files.contains("")) {
+      findings.error("empty-name", text.place(""), "the name of a FILE is empty");
+    } else if (!command.equals(Options.CHECK) && files.size() > 1) {
+      findings.error("too-many-files", text.place(files.get(1)), command + " takes one FILE alone");
     } else if (files.stream().filter(STANDARD_INPUT::equals).count() > 1) {
       findings.error(
           "stdin-twice", text.place(STANDARD_INPUT), "standard input can be read only once");

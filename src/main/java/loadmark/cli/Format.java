@@ -21,6 +21,10 @@ enum Format {
     return Arrays.stream(values()).filter(f -> f.word.equals(word)).findFirst();
   }
 
+  String word() {
+    return word;
+  }
+
   /** Those that a command has. */
   static List<String> words(String command) {
     return Arrays.stream(values()).filter(f -> f.isOf(command)).map(f -> f.word).toList();

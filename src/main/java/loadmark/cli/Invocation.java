@@ -23,6 +23,9 @@ sealed interface Invocation {
   /** To write out one file's impedances. */
   record Curve(String file, Request request, Manner manner) implements Invocation {}
 
+  /** To tell how heavy one file's loads may be. */
+  record Allow(String file, Request request, Manner manner) implements Invocation {}
+
   /**
    * How results are given.
    *

@@ -10,7 +10,9 @@ import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import loadmark.diagnostic.Finding;
 import loadmark.diagnostic.Findings;
+import loadmark.report.AllowJson;
 import loadmark.report.CheckJson;
 import loadmark.report.CurveJson;
 import loadmark.report.Version;
@@ -65,6 +67,11 @@ public final class Loadmark {
           .map(study -> new CurveCommand(curve, study, inputs, streams).run().status())
           .orElseGet(() -> refuse(arguments, findings, curve.request()));
     }
+    if (invocation.get() instanceof Invocation.Allow allow) {
+      return Study.of(allow.request(), findings)
+          .map(study -> new AllowCommand(allow, study, inputs, streams).run().status())
+          .orElseGet(() -> refuse(arguments, findings, allow.request()));
+    }
     return streams.result("loadmark " + Version.CURRENT + "\n") ? 0 : Outcome.INVALID.status();
   }
 
@@ -74,19 +81,22 @@ public final class Loadmark {
     boolean json = Arguments.wantJson(arguments);
     if (json) {
       streams.result(
-          all.indexOf(Options.CURVE) == 0
-              ? CurveJson.write(
-                  Optional.empty(),
-                  Optional.empty(),
-                  Optional.empty(),
-                  findings.sorted(),
-                  request.options())
-              : CheckJson.write(List.of(), findings.sorted(), request.options()));
+          refusal(all.isEmpty() ? "" : all.get(0), findings.sorted(), request.options()));
     }
     if (!json || !all.contains(Options.QUIET)) {
       streams.findings(findings.sorted(), false);
     }
     return Outcome.INVALID.status();
+  }
+
+  /** The JSON of a command that had nothing to do. */
+  private static String refusal(String command, List<Finding> findings, List<String> options) {
+    Optional<String> none = Optional.empty();
+    return switch (command) {
+      case Options.CURVE -> CurveJson.write(none, none, Optional.empty(), findings, options);
+      case Options.ALLOW -> AllowJson.write(none, none, Optional.empty(), findings, options);
+      default -> CheckJson.write(List.of(), findings, options);
+    };
   }
 
   private static String help(String topic) {

@@ -14,11 +14,13 @@ final class Options {
   static final String NAME = "loadmark";
   static final String CHECK = "check";
   static final String CURVE = "curve";
-  static final List<String> COMMANDS = List.of(CHECK, CURVE);
+  static final String ALLOW = "allow";
+  static final List<String> COMMANDS = List.of(CHECK, CURVE, ALLOW);
 
   static final String FORMAT = "--format";
   static final String OUTPUT = "--output";
   static final String AT = "--at";
+  static final String POLES = "--poles";
   static final String SWEEP = "--sweep";
   static final String PORT = "--port";
   static final String CASE = "--case";
@@ -32,9 +34,11 @@ final class Options {
 
   static CommandLine commandLine() {
     CommandSpec check = common(CHECK);
-    CommandSpec curve = common(CURVE).addOption(text(AT));
+    CommandSpec curve = common(CURVE).addOption(text(AT)).addOption(flag(POLES).build());
     CommandSpec root = withHelp(CommandSpec.create().name(NAME));
-    root.addSubcommand(CHECK, check).addSubcommand(CURVE, curve);
+    root.addSubcommand(CHECK, check)
+        .addSubcommand(CURVE, curve)
+        .addSubcommand(ALLOW, common(ALLOW));
     return new CommandLine(root).setExpandAtFiles(false).setAllowOptionsAsOptionParameters(false);
   }
 

@@ -91,7 +91,7 @@ final class Slips {
         root ? Optional.of("options come after the command") : other(option);
     String hint =
         elsewhere
-            .or(() -> Nearest.find(option, known).map(n -> "did you mean `" + n + "`?"))
+            .or(() -> meant(option, known).map(n -> "did you mean `" + n + "`?"))
             .orElse(help(command));
     findings.error(
         "unknown-option",
@@ -102,8 +102,16 @@ final class Slips {
         hint);
   }
 
+  /** The one that begins so, else the nearest. */
+  private static Optional<String> meant(String option, List<String> known) {
+    List<String> longer = known.stream().filter(name -> name.startsWith(option)).toList();
+    return longer.size() == 1 ? Optional.of(longer.get(0)) : Nearest.find(option, known);
+  }
+
   private static Optional<String> other(String option) {
-    return option.equals(Options.AT) ? Optional.of("--at belongs to curve") : Optional.empty();
+    return option.equals(Options.AT) || option.equals(Options.POLES)
+        ? Optional.of(option + " belongs to curve")
+        : Optional.empty();
   }
 
   private static String name(ArgSpec spec) {

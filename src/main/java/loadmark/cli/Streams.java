@@ -23,8 +23,8 @@ final class Streams {
   /**
    * Writes a result whole.
    *
-   * @return whether it arrived; a reader that has gone away is none to be told, anything else is
-   *     told on standard error
+   * @return whether all that is wanted of it arrived: a reader that has gone away has had enough,
+   *     anything else is told on standard error
    */
   boolean result(String text) {
     try {
@@ -32,9 +32,10 @@ final class Streams {
       out.flush();
       return true;
     } catch (IOException failed) {
-      if (!CLOSED.equals(failed.getMessage())) {
-        message("loadmark: standard output could not be written\n");
+      if (CLOSED.equals(failed.getMessage())) {
+        return true;
       }
+      message("loadmark: standard output could not be written\n");
       return false;
     }
   }

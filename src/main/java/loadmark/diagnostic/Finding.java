@@ -19,6 +19,9 @@ public record Finding(
           .thenComparingInt(f -> f.place().line())
           .thenComparingInt(f -> f.place().column());
 
+  /** The code of the finding that says where a source is not read any further. */
+  public static final String READING_STOPS = "too-many";
+
   public boolean isError() {
     return severity == Severity.ERROR;
   }

@@ -1,6 +1,7 @@
 package loadmark.diagnostic;
 
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Writes findings for people: place and message, the line with the slip underlined, the hint.
@@ -26,9 +27,24 @@ public record FindingPrinter(boolean colour) {
     findings.stream().limit(MOST_SHOWN).forEach(finding -> print(finding, out));
     int more = findings.size() - MOST_SHOWN;
     if (more > 0) {
-      out.append("… and ").append(more).append(more == 1 ? " more finding\n" : " more findings\n");
+      Optional<Finding> stop = findStop(findings);
+      out.append("… and ").append(stop.isPresent() ? "at least " : "").append(more);
+      out.append(more == 1 ? " more finding" : " more findings");
+      stop.ifPresent(
+          finding ->
+              out.append(": after so many errors ")
+                  .append(Printable.of(finding.place().source().name()))
+                  .append(" is not read from line ")
+                  .append(finding.place().line())
+                  .append(" on"));
+      out.append('\n');
     }
     return out.toString();
+  }
+
+  /** The finding that says where reading stopped, so that there may be more than are known. */
+  public static Optional<Finding> findStop(List<Finding> findings) {
+    return findings.stream().filter(f -> f.code().equals(Finding.READING_STOPS)).findFirst();
   }
 
   private void print(Finding finding, StringBuilder out) {

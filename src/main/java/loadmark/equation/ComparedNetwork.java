@@ -68,7 +68,7 @@ public record ComparedNetwork(
       if (relevant[branches.size() + i]) {
         int first = numbering.of(place.first());
         int second = numbering.of(place.second());
-        changed.add(new ChangedPlace(first, second, place.series(), place.without(), place.with()));
+        changed.add(place.between(first, second));
       }
     }
     List<Branch> merged = kept.toList();

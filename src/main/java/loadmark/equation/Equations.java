@@ -47,7 +47,7 @@ public final class Equations {
     }
     for (Port port : network.ports()) {
       Law law = closure(port.closure(), reader);
-      if (!port.equals(judged)) {
+      if (!port.name().equals(judged.name())) {
         all.add(branch(port.plus(), port.minus(), law));
       }
     }
@@ -138,7 +138,9 @@ public final class Equations {
                 place.second(),
                 place.series(),
                 place.with(without),
-                place.with(with)));
+                place.with(with),
+                place.with(without, with),
+                place.with(with, without)));
       }
     }
     return ComparedNetwork.of(nodes, plus, minus, all, changed, joins);
@@ -146,7 +148,7 @@ public final class Equations {
 
   private static boolean isSame(Place place, List<Load> without, List<Load> with) {
     for (Load load : place.loads()) {
-      if (without.contains(load) != with.contains(load)) {
+      if (Place.isIn(without, load) != Place.isIn(with, load)) {
         return false;
       }
     }

@@ -5,69 +5,104 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.TreeMap;
+import java.util.stream.Stream;
 import loadmark.network.Band;
 
 /** Finds where a limit is broken within one band of its scope, and its worst point there. */
 final class BandFinder {
+  private static final String NOT_CERTAIN = "its worst value could not be made certain";
+  private static final String MISSED = "the algebra missed a crossing";
+
   private final Gauge gauge;
   private final Probes probes;
+  private final boolean raising;
 
-  BandFinder(Gauge gauge, Probes probes) {
+  /**
+   * @param raising whether worst points are made sure of; else the verdict alone counts
+   */
+  BandFinder(Gauge gauge, Probes probes, boolean raising) {
     this.gauge = gauge;
     this.probes = probes;
+    this.raising = raising;
   }
 
   /**
    * What was found in one band of a scope.
    *
    * @param worst empty where nothing is known
-   * @param unknown the first sample where nothing could be said
+   * @param unknown the first sample of which nothing can be said, or not enough for a verdict
+   * @param doubt why something could have been missed, in words that follow "because"
    */
-  record Found(List<BrokenBand> bands, Optional<Sample> worst, Optional<Sample> unknown) {}
+  record Found(
+      List<BrokenBand> bands,
+      Optional<Sample> worst,
+      Optional<Sample> unknown,
+      Optional<String> doubt) {
+
+    private Found orDoubt(String why) {
+      return new Found(bands, worst, unknown, doubt.or(() -> Optional.of(why)));
+    }
+  }
 
   /** Over a single frequency. */
   Found atPoint(Sample sample) {
-    if (!sample.isKnown()) {
-      return new Found(List.of(), Optional.empty(), Optional.of(sample));
-    }
     List<BrokenBand> bands =
-        sample.isBroken()
+        sample.isSurelyBroken()
             ? List.of(new BrokenBand(Band.at(sample.hz()), sample.toWorst()))
             : List.of();
-    return new Found(bands, Optional.of(sample), Optional.empty());
+    return new Found(
+        bands,
+        Optional.of(sample).filter(Sample::isKnown),
+        Optional.of(sample).filter(s -> !s.isSure()),
+        Optional.empty());
   }
 
   /** Over a band, from samples of it that include both ends. */
   Found over(List<Sample> grid) {
-    List<Sample> samples = withProbes(grid);
+    Found found = once(grid);
+    Optional<Sample> worst = found.worst;
+    if (!found.bands.isEmpty() || worst.isEmpty() || !worst.get().isSurelyBroken()) {
+      return found;
+    }
+    // Raising the level came upon a band where no crossing was seen.
+    TreeMap<Double, Sample> more = new TreeMap<>();
+    Stream.concat(grid.stream(), worst.stream()).forEach(s -> more.put(s.hz(), s));
+    return once(List.copyOf(more.values())).orDoubt(MISSED);
+  }
+
+  private Found once(List<Sample> grid) {
+    Probes.Found probed = probes.find(gauge, grid);
+    Run whole = Run.of(gauge, probed.samples());
+    Optional<String> doubt = probed.doubt();
     List<BrokenBand> bands = new ArrayList<>();
     List<Sample> peaks = new ArrayList<>();
-    int n = samples.size();
-    int from = 0;
-    while (from < n) {
-      if (!samples.get(from).isPast()) {
-        from++;
-        continue;
-      }
-      int to = endOfRun(samples, from);
-      Sample peak = Peak.of(gauge, samples, from, to).orElseThrow();
-      if (peak.isBroken()) {
-        peaks.add(peak);
-        double low =
-            from == 0
-                ? samples.get(0).hz()
-                : Edge.between(gauge, samples.get(from - 1), samples.get(from));
-        double high =
-            to == n - 1
-                ? samples.get(to).hz()
-                : Edge.between(gauge, samples.get(to), samples.get(to + 1));
-        bands.add(new BrokenBand(new Band(low, high), peak.toWorst()));
-      }
-      from = to + 1;
+    List<Run> broken = whole.past().stream().filter(Run::isSurelyBroken).toList();
+    for (Run run : broken) {
+      Band band = run.band();
+      Sample peak = run.peak().orElseThrow();
+      Optional<Sample> worst = raised(band, peak, doubt);
+      doubt = worst.isEmpty() ? Optional.of(NOT_CERTAIN) : doubt;
+      peaks.add(worst.orElse(peak));
+      bands.add(new BrokenBand(band, worst.orElse(peak).toWorst()));
     }
-    Optional<Sample> worst = peaks.isEmpty() ? Peak.of(gauge, samples, 0, n - 1) : worstOf(peaks);
-    Optional<Sample> unknown = samples.stream().filter(s -> !s.isKnown()).findFirst();
-    return new Found(bands, worst, unknown);
+    if (broken.isEmpty() && whole.peak().isPresent()) {
+      Sample peak = whole.peak().get();
+      Optional<Sample> worst = raised(whole.band(), peak, doubt);
+      doubt = worst.isEmpty() ? Optional.of(NOT_CERTAIN) : doubt;
+      peaks.add(worst.orElse(peak));
+    }
+    Optional<Sample> unknown =
+        Stream.concat(probed.samples().stream(), peaks.stream())
+            .filter(s -> !s.isSure())
+            .findFirst();
+    return new Found(bands, worstOf(peaks), unknown, doubt);
+  }
+
+  /** The worst point of a band; empty where it should be certain and is not. */
+  private Optional<Sample> raised(Band band, Sample peak, Optional<String> doubt) {
+    return raising && doubt.isEmpty() && !band.isPoint()
+        ? probes.raise(gauge, band, peak)
+        : Optional.of(peak);
   }
 
   /** The first of the worst among those that are known. */
@@ -76,25 +111,5 @@ final class BandFinder {
     return known.stream()
         .max(Comparator.comparingDouble(Sample::excess))
         .flatMap(best -> known.stream().filter(one -> Peak.isTie(one, best)).findFirst());
-  }
-
-  private List<Sample> withProbes(List<Sample> grid) {
-    TreeMap<Double, Sample> all = new TreeMap<>();
-    probes.find(gauge, grid).forEach(s -> all.put(s.hz(), s));
-    grid.forEach(s -> all.put(s.hz(), s));
-    return List.copyOf(all.values());
-  }
-
-  /** The last sample of a run past the bound; what is unknown inside a run belongs to it. */
-  private static int endOfRun(List<Sample> samples, int from) {
-    int to = from;
-    for (int i = from + 1; i < samples.size(); i++) {
-      if (samples.get(i).isPast()) {
-        to = i;
-      } else if (samples.get(i).isKnown()) {
-        break;
-      }
-    }
-    return to;
   }
 }

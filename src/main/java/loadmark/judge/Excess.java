@@ -9,21 +9,30 @@ final class Excess {
   /** A value past its bound by this share of it is still kept. */
   static final double SLACK = 1e-9;
 
+  /** The excess of a value that is as far past its bound as is still kept. */
+  private static final double KEPT = Math.log1p(SLACK);
+
   private Excess() {}
 
-  /** A value of 0 or more, possibly infinite, against the most it may be. */
-  static Reading.Known atMost(double value, double most) {
+  /**
+   * A value of 0 or more, possibly infinite, against the most it may be.
+   *
+   * @param error relative, of the value
+   */
+  static Reading.Known atMost(double value, double most, double error) {
     double excess = logRatio(value, most);
     return value == Double.POSITIVE_INFINITY
         ? Reading.unbounded(excess)
-        : Reading.of(value, excess, value > most * (1 + SLACK));
+        : Reading.of(value, excess, KEPT, Spread.ofLogarithm(error));
   }
 
   /**
    * A value of 0 or more, possibly infinite, in a window: the larger of ln(value/to) and
    * ln(from/value).
+   *
+   * @param spread of ln(value)
    */
-  static Reading.Known within(double value, OptionalDouble from, OptionalDouble to) {
+  static Reading.Known within(double value, OptionalDouble from, OptionalDouble to, Spread spread) {
     double over = to.isPresent() ? logRatio(value, to.getAsDouble()) : Double.NEGATIVE_INFINITY;
     double under =
         from.isPresent() ? logRatio(from.getAsDouble(), value) : Double.NEGATIVE_INFINITY;
@@ -31,10 +40,9 @@ final class Excess {
     if (value == Double.POSITIVE_INFINITY) {
       return Reading.unbounded(excess);
     }
-    boolean broken =
-        (to.isPresent() && value > to.getAsDouble() * (1 + SLACK))
-            || (from.isPresent() && value < from.getAsDouble() * (1 - SLACK));
-    return Reading.of(value, excess, broken);
+    Spread either =
+        to.isEmpty() ? spread.turned() : from.isEmpty() ? spread : spread.or(spread.turned());
+    return Reading.of(value, excess, KEPT, either);
   }
 
   /** ln(a/b) for a, b of 0 or more; 0 where they are one, infinite where one alone is 0 or ∞. */

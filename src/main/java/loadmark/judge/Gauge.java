@@ -1,5 +1,6 @@
 package loadmark.judge;
 
+import java.util.List;
 import loadmark.response.Comparison;
 import loadmark.response.Loading;
 
@@ -9,7 +10,14 @@ record Gauge(Comparison comparison, Measure measure) {
     return of(comparison.at(hz));
   }
 
+  /** At many frequencies, in their order. */
+  List<Sample> at(double[] hz) {
+    return comparison.at(hz).stream().map(this::of).toList();
+  }
+
   Sample of(Loading loading) {
-    return new Sample(loading, measure.read(loading));
+    Reading reading = measure.read(loading);
+    boolean known = !(reading instanceof Reading.Known one) || one.spread().isKnown();
+    return new Sample(loading, known ? reading : Unknowns.unsolved());
   }
 }

@@ -5,6 +5,7 @@ import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.function.Predicate;
 import java.util.stream.Stream;
 import loadmark.network.Case;
 import loadmark.network.Limit;
@@ -58,7 +59,8 @@ public final class Judge {
           network.limits().stream()
               .filter(l -> l.criterion().isAbsolute() && l.ports().contains(port))
               .toList();
-      limits(Case.bare(), absolute, l -> Optional.empty()).forEach(j -> bare.put(j.limit(), j));
+      limits(Case.bare(), absolute, l -> Optional.empty(), l -> false)
+          .forEach(j -> bare.put(j.limit(), j));
     }
 
     Stream<CaseJudgement> judge() {
@@ -68,7 +70,7 @@ public final class Judge {
 
     private CaseJudgement judge(Case one) {
       List<Limit> holding = network.limits().stream().filter(l -> l.holdsFor(one, port)).toList();
-      List<LimitJudgement> limits = limits(one, holding, this::bareVerdict);
+      List<LimitJudgement> limits = limits(one, holding, this::bareVerdict, l -> true);
       Verdict verdict = worst(limits.stream().map(LimitJudgement::verdict));
       List<Blame> blame =
           verdict == Verdict.BROKEN && one.loads().size() > 1 ? blame(one, limits) : List.of();
@@ -80,9 +82,15 @@ public final class Judge {
     }
 
     private List<LimitJudgement> limits(
-        Case one, List<Limit> limits, Function<Limit, Optional<Verdict>> bareVerdict) {
-      return new LimitJudge(response.compare(one.loads(), one.against()), limits)
-          .judge(bareVerdict);
+        Case one,
+        List<Limit> limits,
+        Function<Limit, Optional<Verdict>> bareVerdict,
+        Predicate<Limit> raising) {
+      return new LimitJudge(
+              response.compare(one.loads(), one.against()),
+              response.crossings(one.loads(), one.against()),
+              limits)
+          .judge(bareVerdict, raising);
     }
 
     /** The case with each of its loads taken off in turn, from its reference too. */
@@ -94,7 +102,8 @@ public final class Judge {
         Case without =
             new Case(
                 one.name(), allBut(load, one.loads()), allBut(load, one.against()), one.line());
-        List<LimitJudgement> then = limits(without, same, this::bareVerdict);
+        Limit shown = same.get(first);
+        List<LimitJudgement> then = limits(without, same, this::bareVerdict, shown::equals);
         Verdict verdict = worst(then.stream().map(LimitJudgement::verdict));
         blame.add(new Blame(load, verdict, then.get(first).worst()));
       }

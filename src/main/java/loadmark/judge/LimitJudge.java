@@ -1,28 +1,33 @@
 package loadmark.judge;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.SortedSet;
 import java.util.TreeSet;
 import java.util.function.Function;
+import java.util.function.Predicate;
+import loadmark.judge.LimitJudgement.Method;
 import loadmark.network.Band;
 import loadmark.network.Limit;
 import loadmark.response.Comparison;
+import loadmark.response.Crossings;
 import loadmark.response.Loading;
 
 /** Judges several limits of one port with one set of loads; they share their samples. */
 final class LimitJudge {
-  private static final MathContext SHORT = new MathContext(6);
-
   private final Comparison comparison;
+  private final Probes probes;
   private final List<Limit> limits;
   private final List<List<Loading>> grids;
 
-  LimitJudge(Comparison comparison, List<Limit> limits) {
+  LimitJudge(Comparison comparison, Crossings crossings, List<Limit> limits) {
     this.comparison = comparison;
+    this.probes =
+        crossings
+            .findObstacle()
+            .<Probes>map(TurningPoints::new)
+            .orElseGet(() -> new CrossingProbes(new Algebra(crossings)));
     this.limits = List.copyOf(limits);
     Curves curves =
         new Curves(limits.stream().map(l -> new Curves.Scoped(Measure.of(l), l.scope())).toList());
@@ -30,15 +35,20 @@ final class LimitJudge {
         stretches(limits).stream().map(marks -> Grid.sample(comparison, marks, curves)).toList();
   }
 
-  /** One judgement a limit, in order. */
-  List<LimitJudgement> judge(Function<Limit, Optional<Verdict>> bareVerdict) {
-    return limits.stream().map(l -> judge(l, bareVerdict.apply(l))).toList();
+  /**
+   * One judgement a limit, in order.
+   *
+   * @param raising those whose worst values are made sure of; of the others the verdict counts
+   */
+  List<LimitJudgement> judge(
+      Function<Limit, Optional<Verdict>> bareVerdict, Predicate<Limit> raising) {
+    return limits.stream().map(l -> judge(l, bareVerdict.apply(l), raising.test(l))).toList();
   }
 
-  private LimitJudgement judge(Limit limit, Optional<Verdict> bareVerdict) {
-    Probes probes = new TurningPoints();
+  private LimitJudgement judge(Limit limit, Optional<Verdict> bareVerdict, boolean raising) {
     Gauge gauge = new Gauge(comparison, Measure.of(limit));
-    BandFinder finder = new BandFinder(gauge, probes);
+    BandFinder finder = new BandFinder(gauge, probes, raising);
+    Optional<String> doubt = Optional.empty();
     List<BrokenBand> bands = new ArrayList<>();
     List<Sample> worst = new ArrayList<>();
     List<Sample> unknown = new ArrayList<>();
@@ -50,16 +60,18 @@ final class LimitJudge {
       bands.addAll(found.bands());
       found.worst().ifPresent(worst::add);
       found.unknown().ifPresent(unknown::add);
+      doubt = doubt.or(found::doubt);
     }
     Verdict kept = unknown.isEmpty() ? Verdict.KEPT : Verdict.UNDETERMINED;
     return new LimitJudgement(
         limit,
         bands.isEmpty() ? kept : Verdict.BROKEN,
         bareVerdict,
-        probes.method(),
+        doubt.isEmpty() ? Method.COMPLETE : Method.SAMPLED,
+        doubt.orElse(""),
         BandFinder.worstOf(worst).map(Sample::toWorst),
         bands,
-        unknown.isEmpty() ? "" : words(unknown.get(0)));
+        unknown.isEmpty() ? "" : Words.doubt(unknown.get(0)));
   }
 
   private List<Sample> samples(Gauge gauge, Band band) {
@@ -68,12 +80,6 @@ final class LimitJudge {
         .findFirst()
         .map(g -> Grid.inside(g, band).stream().map(gauge::of).toList())
         .orElseThrow();
-  }
-
-  private static String words(Sample sample) {
-    String why = sample.reading() instanceof Reading.Unknown unknown ? unknown.why() : "";
-    String hz = new BigDecimal(sample.hz()).round(SHORT).stripTrailingZeros().toPlainString();
-    return why + (sample.hz() == 0 ? " at DC" : " at " + hz + " Hz");
   }
 
   /** The ends of all scopes, those that overlap together. */

@@ -8,6 +8,8 @@ import loadmark.network.Limit;
  * One limit, judged for one case at one port.
  *
  * @param bareVerdict for an absolute limit: the verdict without the case's loads
+ * @param methodReason where sampled: why a breach could have been missed, in a few words for people
+ *     that follow "because"; else empty
  * @param worst the worst point; empty where nothing could be determined
  * @param bands every stretch where it is broken, in order
  * @param undetermined why, in a few words for people, where something could not be determined; else
@@ -18,6 +20,7 @@ public record LimitJudgement(
     Verdict verdict,
     Optional<Verdict> bareVerdict,
     Method method,
+    String methodReason,
     Optional<Worst> worst,
     List<BrokenBand> bands,
     String undetermined) {

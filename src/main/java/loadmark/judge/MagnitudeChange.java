@@ -1,6 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
+import java.util.Optional;
+import loadmark.network.Criterion;
 import loadmark.response.Change;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 
 /**
@@ -14,7 +18,12 @@ record MagnitudeChange(double most) implements Measure {
     if (h.isUndetermined()) {
       return Unknowns.ofChange(loading);
     }
-    return Excess.atMost(h.isUnbounded() ? Double.POSITIVE_INFINITY : magnitude(h), most);
+    if (h.isUnbounded()) {
+      return Excess.atMost(Double.POSITIVE_INFINITY, most, 0);
+    }
+    double value = magnitude(h);
+    double error = value > 0 ? loading.changeError() * (h.magnitude() / value) : 0;
+    return Excess.atMost(value, most, error);
   }
 
   /** |2·Re h + |h|²| / (|1 + h| + 1). */
@@ -25,5 +34,10 @@ record MagnitudeChange(double most) implements Measure {
     }
     double share = size / (Math.hypot(1 + h.re(), h.im()) + 1);
     return Math.abs(2 * h.re() / size + size) * share;
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    return Levels.ofMost(Criterion.MAGNITUDE_CHANGE, Optional.empty(), most, excess);
   }
 }

@@ -1,6 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
+import java.util.Optional;
+import loadmark.network.Criterion;
 import loadmark.network.OnePort;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 import loadmark.response.OnePortImpedance;
@@ -20,10 +24,17 @@ record MagnitudeWithin(double most, OnePort reference) implements Measure {
     if (with.isZero() && ref.isZero()) {
       return new Reading.Unknown("0/0, a short like its reference");
     }
-    return Excess.atMost(Math.abs(ratioLessOne(with.magnitude(), ref.magnitude())), most);
+    double value = Math.abs(ratioLessOne(with.magnitude(), ref.magnitude()));
+    double error = loading.withError() * (with.magnitude() / ref.magnitude());
+    return Excess.atMost(value, most, value > 0 ? error / value : 0);
   }
 
   private static double ratioLessOne(double a, double b) {
     return Double.isInfinite(a) || Double.isInfinite(b) ? a / b - 1 : (a - b) / b;
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    return Levels.ofMost(Criterion.MAGNITUDE_WITHIN, Optional.of(reference), most, excess);
   }
 }

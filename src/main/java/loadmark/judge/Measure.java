@@ -1,8 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
 import loadmark.network.Bound;
 import loadmark.network.Limit;
 import loadmark.network.OnePort;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 
 /**
@@ -23,8 +25,21 @@ sealed interface Measure
         ParallelCapacitance,
         ParallelResistance,
         ReturnLoss {
+  /** Relative: a tenth of what is promised of worst values. */
+  double GRAIN = 1e-10;
 
   Reading read(Loading loading);
+
+  /**
+   * The levels of one criterion or of several that the value has wherever the excess is this one;
+   * it may have them elsewhere too. None where no finite value has it.
+   */
+  List<Level> levels(double excess);
+
+  /** The excess that a billionth of the value makes, by which worst values are told apart. */
+  default double grain(Reading.Known known) {
+    return GRAIN;
+  }
 
   /** What judges {@code limit}, inside its scope. */
   static Measure of(Limit limit) {

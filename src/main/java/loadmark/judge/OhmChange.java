@@ -1,7 +1,9 @@
 package loadmark.judge;
 
+import java.util.List;
 import java.util.OptionalDouble;
 import loadmark.response.Change;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 
@@ -17,11 +19,19 @@ record OhmChange(double mostOhm) implements Measure {
     if (with.isOpen() && without.isOpen()) {
       return new Reading.Unknown("∞ − ∞, open with and without");
     }
-    Reading.Known ohms = Excess.atMost(difference(loading), mostOhm);
+    Reading.Known ohms = Excess.atMost(difference(loading), mostOhm, error(loading));
     Change change = loading.change();
     OptionalDouble ratio =
         change.isFinite() ? OptionalDouble.of(change.magnitude()) : OptionalDouble.empty();
-    return new Reading.Known(ratio, ohms.value(), ohms.excess(), ohms.broken());
+    return new Reading.Known(ratio, ohms.value(), ohms.excess(), ohms.slack(), ohms.spread());
+  }
+
+  /** Relative, of the difference. */
+  private static double error(Loading loading) {
+    if (loading.change().isFinite()) {
+      return loading.changeError() + loading.withoutError();
+    }
+    return Math.max(loading.withError(), loading.withoutError());
   }
 
   /** Ω; from the change where there is one, which cancels nothing. */
@@ -34,5 +44,11 @@ record OhmChange(double mostOhm) implements Measure {
     return loading.change().isFinite()
         ? loading.change().magnitude() * without.magnitude()
         : Math.hypot(with.re() - without.re(), with.im() - without.im());
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    double ohm = mostOhm * Math.exp(excess);
+    return ohm > 0 && ohm < Double.POSITIVE_INFINITY ? List.of(Level.ofDifference(ohm)) : List.of();
   }
 }

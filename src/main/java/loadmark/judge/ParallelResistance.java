@@ -1,6 +1,9 @@
 package loadmark.judge;
 
+import java.util.List;
 import java.util.OptionalDouble;
+import loadmark.network.Criterion;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 
@@ -21,18 +24,28 @@ record ParallelResistance(OptionalDouble from, OptionalDouble to) implements Mea
     }
     if (z.isZero()) {
       return loading.hz() == 0
-          ? Excess.within(0, from, to)
+          ? Excess.within(0, from, to, Spread.NONE)
           : new Reading.Unknown("a short has no parallel resistance");
     }
     double cosine = z.isOpen() ? 0 : z.re() / z.magnitude();
     if (Math.abs(cosine) < ROUNDING) {
-      return Excess.within(Double.POSITIVE_INFINITY, from, to);
+      double least = z.magnitude() / (ROUNDING + loading.withError());
+      return least < from.orElse(0) ? Unknowns.unsolved() : infinite();
     }
     double ohm = z.magnitude() / cosine;
     if (ohm > 0) {
-      return Excess.within(ohm, from, to);
+      Spread spread = Spread.ofLogarithm(loading.withError() / cosine).turned();
+      return Excess.within(ohm, from, to, spread);
     }
-    Reading.Known beyond = Excess.within(Double.POSITIVE_INFINITY, from, to);
-    return Reading.of(ohm, beyond.excess(), beyond.broken());
+    return Reading.of(ohm, infinite().excess(), infinite().slack(), Spread.NONE);
+  }
+
+  private Reading.Known infinite() {
+    return Excess.within(Double.POSITIVE_INFINITY, from, to, Spread.NONE);
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    return Levels.ofWindow(Criterion.PARALLEL_RESISTANCE, from, to, excess);
   }
 }

@@ -1,6 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
+import java.util.Optional;
+import loadmark.network.Criterion;
 import loadmark.response.Change;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 
 /** The change of the phase, degrees without sign, at most {@code most}. */
@@ -16,14 +20,25 @@ record PhaseChange(double most) implements Measure {
     if (Angle.hasNone(loading.without())) {
       return Unknowns.ofPhase(loading.without());
     }
-    return Excess.atMost(Math.abs(degrees(loading)), most);
+    Change h = loading.change();
+    double sum = h.isFinite() ? Math.hypot(1 + h.re(), h.im()) : 0;
+    if (sum < CANCELS) {
+      double degrees = Angle.between(loading.with(), loading.without());
+      return read(degrees, loading.withError() + loading.withoutError());
+    }
+    return read(Angle.of(1 + h.re(), h.im()), loading.changeError() * (h.magnitude() / sum));
   }
 
-  private static double degrees(Loading loading) {
-    Change h = loading.change();
-    if (!h.isFinite() || Math.hypot(1 + h.re(), h.im()) < CANCELS) {
-      return Angle.between(loading.with(), loading.without());
-    }
-    return Angle.of(1 + h.re(), h.im());
+  /**
+   * @param error of the angle, radians
+   */
+  private Reading read(double degrees, double error) {
+    double size = Math.abs(degrees);
+    return Excess.atMost(size, most, size > 0 ? error / Math.toRadians(size) : 0);
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    return Levels.ofMost(Criterion.PHASE_CHANGE, Optional.empty(), most, excess);
   }
 }

@@ -1,5 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.DoubleStream;
+import loadmark.network.Criterion;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 
@@ -20,6 +25,21 @@ record PhaseWindow(double from, double to) implements Measure {
     double past = Math.abs(off) - (to - from) / 2;
     double edge = Math.abs(off > 0 ? to : from);
     double slack = Excess.SLACK * (edge == 0 ? to - from : edge);
-    return Reading.of(middle + off, Math.toRadians(past), past > slack);
+    return Reading.of(
+        middle + off, Math.toRadians(past), Math.toRadians(slack), Spread.of(loading.withError()));
+  }
+
+  @Override
+  public double grain(Reading.Known known) {
+    return GRAIN * Math.toRadians(Math.abs(known.value().orElse(0)));
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    double degrees = Math.toDegrees(excess);
+    return DoubleStream.of(from - degrees, to + degrees)
+        .filter(Double::isFinite)
+        .mapToObj(value -> Level.of(Criterion.PHASE, Optional.empty(), value))
+        .toList();
   }
 }

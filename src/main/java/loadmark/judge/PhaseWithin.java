@@ -1,6 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
+import java.util.Optional;
+import loadmark.network.Criterion;
 import loadmark.network.OnePort;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 import loadmark.response.OnePortImpedance;
@@ -17,6 +21,13 @@ record PhaseWithin(double most, OnePort reference) implements Measure {
     if (Angle.hasNone(ref)) {
       return Unknowns.ofPhase(ref);
     }
-    return Excess.atMost(Math.abs(Angle.between(with, ref)), most);
+    double value = Math.abs(Angle.between(with, ref));
+    double error = value > 0 ? loading.withError() / Math.toRadians(value) : 0;
+    return Excess.atMost(value, most, error);
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    return Levels.ofMost(Criterion.PHASE_WITHIN, Optional.of(reference), most, excess);
   }
 }

@@ -35,7 +35,8 @@ final class Pole {
             value ? none : known.value(),
             ohm ? none : known.valueOhm(),
             all ? Double.POSITIVE_INFINITY : known.excess(),
-            true));
+            known.slack(),
+            known.spread()));
   }
 
   private static boolean grows(

@@ -1,6 +1,10 @@
 package loadmark.judge;
 
+import java.util.List;
+import java.util.Optional;
+import loadmark.network.Criterion;
 import loadmark.network.OnePort;
+import loadmark.response.Level;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 import loadmark.response.OnePortImpedance;
@@ -22,13 +26,25 @@ record ReturnLoss(double least, OnePort reference) implements Measure {
     if (z.isZero() && ref.isZero()) {
       return new Reading.Unknown("0/0, a short like its reference");
     }
-    double nepers = z.isOpen() || ref.isOpen() ? 0 : nepers(z, ref);
+    boolean finite = z.isFinite() && ref.isFinite();
+    double nepers = finite ? nepers(z, ref) : 0;
     double excess = least / DB_PER_NEPER - nepers;
     if (Double.isInfinite(nepers)) {
       return Reading.unbounded(excess);
     }
     double db = nepers * DB_PER_NEPER;
-    return Reading.of(db, excess, least - db > Excess.SLACK * Math.abs(least));
+    double slack = Excess.SLACK * Math.abs(least) / DB_PER_NEPER;
+    Spread spread = finite ? Spread.ofLogarithm(loading.withError() * slope(z, ref)) : Spread.NONE;
+    return Reading.of(db, excess, slack, spread);
+  }
+
+  /** How far a relative error of z moves the loss in nepers: |2·z·r/(z² − r²)|. */
+  private static double slope(Ohms z, Ohms r) {
+    double scale = Math.max(z.magnitude(), r.magnitude());
+    double sum = Math.hypot(z.re() / scale + r.re() / scale, z.im() / scale + r.im() / scale);
+    double difference =
+        Math.hypot(z.re() / scale - r.re() / scale, z.im() / scale - r.im() / scale);
+    return 2 * (z.magnitude() / scale) * (r.magnitude() / scale) / sum / difference;
   }
 
   /**
@@ -48,5 +64,13 @@ record ReturnLoss(double least, OnePort reference) implements Measure {
       return Math.log1p(4 * product / (difference * difference)) / 2;
     }
     return Excess.logRatio(sum, difference);
+  }
+
+  @Override
+  public List<Level> levels(double excess) {
+    double db = least - excess * DB_PER_NEPER;
+    return Double.isFinite(db)
+        ? List.of(Level.of(Criterion.RETURN_LOSS, Optional.of(reference), db))
+        : List.of();
   }
 }

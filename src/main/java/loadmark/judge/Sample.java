@@ -35,6 +35,16 @@ record Sample(Loading loading, Reading reading) {
     return reading instanceof Reading.Known known && known.broken();
   }
 
+  /** Known, and on the side of the slack that it seems to be on, whatever the error. */
+  boolean isSure() {
+    return reading instanceof Reading.Known known && known.sure();
+  }
+
+  /** Past the bound by more than the slack and than any error. */
+  boolean isSurelyBroken() {
+    return isBroken() && isSure();
+  }
+
   Worst toWorst() {
     Reading.Known known = (Reading.Known) reading;
     return new Worst(hz(), known.value(), known.valueOhm(), loading.without(), loading.with());

@@ -20,6 +20,8 @@ final class CaseText {
   /** More bands than these are counted; the JSON report has them all. */
   private static final int MOST_BANDS = 12;
 
+  private static final int LONGEST_NAME = 60;
+
   private final CaseJudgement one;
   private final Page page;
 
@@ -32,7 +34,7 @@ final class CaseText {
     Case judged = one.judged();
     page.heading(
         Outcome.of(one.verdict()),
-        "case " + Visible.of(judged.name()) + " at port " + Visible.of(one.port().name()));
+        "case " + name(judged.name()) + " at port " + name(one.port().name()));
     judged.loads().forEach(load -> page.labelled("load", describe(load)));
     if (!judged.against().isEmpty()) {
       page.labelled("against", names(judged.against()));
@@ -44,8 +46,13 @@ final class CaseText {
     writeBlame();
   }
 
+  /** Short enough to stand in a line. */
+  private static String name(String name) {
+    return Visible.cut(Visible.of(name), LONGEST_NAME);
+  }
+
   private static String describe(Load load) {
-    return Visible.of(load.name())
+    return name(load.name())
         + " "
         + load.placement().name().toLowerCase(Locale.ROOT)
         + " "
@@ -64,7 +71,7 @@ final class CaseText {
   }
 
   /** On one line, safe to show. */
-  private static String clean(String text) {
+  static String clean(String text) {
     StringBuilder line = new StringBuilder();
     for (int i = 0; i < text.length(); i++) {
       char c = text.charAt(i);
@@ -99,13 +106,17 @@ final class CaseText {
             + place(worst.hz())
             + "; allowed: "
             + Values.bound(limit));
+    if (one.judged().isBare()) {
+      page.labelled(
+          "impedance",
+          Impedances.polar(worst.without()) + "    " + Impedances.rectangular(worst.without()));
+      return;
+    }
     String without = Impedances.polar(worst.without());
     String with = Impedances.polar(worst.with());
     int width = Math.max(Visible.width(without), Visible.width(with)) + 4;
     page.labelled("without", Visible.pad(without, width) + Impedances.rectangular(worst.without()));
-    if (!one.judged().isBare()) {
-      page.labelled("with", Visible.pad(with, width) + Impedances.rectangular(worst.with()));
-    }
+    page.labelled("with", Visible.pad(with, width) + Impedances.rectangular(worst.with()));
   }
 
   private static String place(double hz) {
@@ -164,7 +175,7 @@ final class CaseText {
             .map(LimitJudgement::limit)
             .findFirst()
             .orElseThrow();
-    Columns columns = new Columns("ll");
+    Columns columns = new Columns("nl");
     for (Blame blame : one.blame()) {
       String worst =
           blame

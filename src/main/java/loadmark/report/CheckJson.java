@@ -9,6 +9,7 @@ import loadmark.judge.Blame;
 import loadmark.judge.BrokenBand;
 import loadmark.judge.CaseJudgement;
 import loadmark.judge.LimitJudgement;
+import loadmark.judge.LimitJudgement.Method;
 import loadmark.judge.NetworkJudgement;
 import loadmark.judge.Verdict;
 import loadmark.judge.Worst;
@@ -127,6 +128,9 @@ public final class CheckJson {
     json.writeFieldName("bare_verdict");
     json.writeString(judged.bareVerdict().map(Verdict::word).orElse(null));
     json.writeStringField("method", judged.method().word());
+    if (judged.method() == Method.SAMPLED) {
+      json.writeStringField("method_reason", judged.methodReason());
+    }
     if (judged.worst().isPresent()) {
       Worst worst = judged.worst().get();
       json.writeObjectFieldStart("worst");

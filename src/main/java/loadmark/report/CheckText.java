@@ -44,7 +44,7 @@ public final class CheckText {
     Page page = new Page(style, anyUndetermined(files));
     page.row(
         style.bold(files.size() + " files: " + counts(files.stream().map(FileResult::outcome))));
-    Columns columns = new Columns("ll");
+    Columns columns = new Columns("nl");
     List<FileResult> ordered =
         files.stream().sorted(Comparator.comparing(FileResult::outcome).reversed()).toList();
     ordered.forEach(f -> columns.add(Visible.of(f.file()), inShort(f)));

@@ -12,25 +12,29 @@ final class Columns {
   private static final int LEAST = 8;
 
   private final List<String[]> rows = new ArrayList<>();
-  private final String right;
+  private final String alignment;
 
   /**
-   * @param alignment a letter a column: {@code r} for right, {@code l} for left
+   * @param alignment a letter a column: {@code r} for right, {@code l} for left; {@code n} for left
+   *     and names, which may be cut
    */
   Columns(String alignment) {
-    this.right = alignment;
+    this.alignment = alignment;
   }
 
   void add(String... cells) {
-    if (cells.length != right.length()) {
-      throw new IllegalArgumentException(Arrays.toString(cells) + " in " + right);
+    if (cells.length != alignment.length()) {
+      throw new IllegalArgumentException(Arrays.toString(cells) + " in " + alignment);
     }
     rows.add(cells);
   }
 
-  /** The rows as lines of at most {@code room} columns; the widest columns are cut first. */
+  /**
+   * The rows as lines of at most {@code room} columns as far as cutting names makes them so, the
+   * widest first; nothing else is cut.
+   */
   List<String> lines(int room) {
-    int[] widths = new int[right.length()];
+    int[] widths = new int[alignment.length()];
     for (String[] row : rows) {
       for (int i = 0; i < widths.length; i++) {
         widths[i] = Math.max(widths[i], Visible.width(row[i]));
@@ -40,14 +44,15 @@ final class Columns {
     return rows.stream().map(row -> line(row, widths)).toList();
   }
 
-  private static void shrink(int[] widths, int room) {
+  private void shrink(int[] widths, int room) {
     int over = Arrays.stream(widths).sum() + GAP * (widths.length - 1) - room;
     while (over > 0) {
-      int widest = 0;
-      for (int i = 1; i < widths.length; i++) {
-        widest = widths[i] > widths[widest] ? i : widest;
+      int widest = -1;
+      for (int i = 0; i < widths.length; i++) {
+        boolean name = alignment.charAt(i) == 'n' && widths[i] > LEAST;
+        widest = name && (widest < 0 || widths[i] > widths[widest]) ? i : widest;
       }
-      if (widths[widest] <= LEAST) {
+      if (widest < 0) {
         return;
       }
       widths[widest]--;
@@ -61,7 +66,9 @@ final class Columns {
       String cell = Visible.cut(row[i], widths[i]);
       line.append(i == 0 ? "" : " ".repeat(GAP));
       line.append(
-          right.charAt(i) == 'r' ? Visible.padLeft(cell, widths[i]) : Visible.pad(cell, widths[i]));
+          alignment.charAt(i) == 'r'
+              ? Visible.padLeft(cell, widths[i])
+              : Visible.pad(cell, widths[i]));
     }
     return line.toString().stripTrailing();
   }

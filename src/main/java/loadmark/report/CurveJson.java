@@ -8,6 +8,7 @@ import loadmark.diagnostic.Finding;
 import loadmark.quantity.Engineering;
 import loadmark.response.Loading;
 import loadmark.study.CurveTable;
+import org.apache.commons.math3.complex.Complex;
 
 /** Curves as {@code loadmark/curve/1}. */
 public final class CurveJson {
@@ -57,7 +58,24 @@ public final class CurveJson {
       }
       json.writeEndArray();
     }
+    if (curve.roots().isPresent()) {
+      writeRoots(json, "poles", curve.roots().get().poles());
+      writeRoots(json, "zeros", curve.roots().get().zeros());
+    }
     json.writeEndObject();
+  }
+
+  /** In rad/s, by rising |s|; of a conjugate pair both. */
+  private static void writeRoots(JsonGenerator json, String name, List<Complex> roots)
+      throws IOException {
+    json.writeArrayFieldStart(name);
+    for (Complex root : roots) {
+      json.writeStartObject();
+      Json.writeNumber(json, "re", root.getReal());
+      Json.writeNumber(json, "im", root.getImaginary());
+      json.writeEndObject();
+    }
+    json.writeEndArray();
   }
 
   /** JSON has no infinity: the word that the CSV uses stands for it, and null for nothing. */

@@ -26,6 +26,13 @@ public final class CurveText {
           "port " + Visible.of(curve.port().name()) + ", case " + Visible.of(curve.shown().name());
       line(text, style.bold(Visible.cut(heading, Page.WIDTH)));
       columns(curve).lines(Page.WIDTH).forEach(l -> line(text, l));
+      curve
+          .roots()
+          .ifPresent(
+              roots -> {
+                text.append('\n');
+                RootsText.lines(roots).forEach(l -> line(text, l));
+              });
     }
     return text.toString();
   }

@@ -1,7 +1,11 @@
 package loadmark.report;
 
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.SortedSet;
+import java.util.TreeSet;
 import java.util.stream.Collectors;
 import loadmark.judge.CaseJudgement;
 import loadmark.judge.LimitJudgement;
@@ -66,36 +70,36 @@ final class FileText {
     return dc.isEmpty() || band.isEmpty() ? dc + band : dc + " and " + band;
   }
 
-  /** How far the judgements can be trusted not to have missed anything. */
+  /** Where the judgements cannot be trusted not to have missed anything, and why. */
   private void writeMethod() {
-    List<Limit> sampled =
-        judgement.cases().stream()
-            .flatMap(c -> c.limits().stream())
-            .filter(l -> l.method() == Method.SAMPLED)
-            .map(LimitJudgement::limit)
-            .toList();
-    long all = judgement.cases().stream().mapToLong(c -> c.limits().size()).sum();
-    if (sampled.isEmpty()) {
-      page.paragraph("complete: every crossing was found, none can hide between frequencies");
-      return;
+    Map<String, SortedSet<Integer>> linesByReason = new LinkedHashMap<>();
+    SortedSet<Integer> complete = new TreeSet<>();
+    for (CaseJudgement one : judgement.cases()) {
+      for (LimitJudgement limit : one.limits()) {
+        SortedSet<Integer> lines =
+            limit.method() == Method.COMPLETE
+                ? complete
+                : linesByReason.computeIfAbsent(limit.methodReason(), r -> new TreeSet<>());
+        lines.add(limit.limit().line());
+      }
     }
-    String which =
-        sampled.size() == all
-            ? "sampled"
-            : "sampled in line "
-                + sampled.stream()
-                    .map(Limit::line)
-                    .distinct()
-                    .sorted()
-                    .map(line -> Integer.toString(line))
-                    .collect(Collectors.joining(", "))
-                + ", else complete";
-    page.paragraph(which + ": a breach narrower than the grid of frequencies could be missed");
+    boolean all = complete.isEmpty() && linesByReason.size() == 1;
+    linesByReason.forEach(
+        (reason, lines) ->
+            page.paragraph(
+                "sampled"
+                    + (all ? "" : " in line " + join(lines))
+                    + ": a breach narrower than the grid of frequencies could be missed, because "
+                    + Visible.of(reason)));
+  }
+
+  private static String join(SortedSet<Integer> lines) {
+    return lines.stream().map(line -> Integer.toString(line)).collect(Collectors.joining(", "));
   }
 
   private void writeGlance() {
     boolean ports = judgement.network().ports().size() > 1;
-    Columns columns = new Columns("llrllll");
+    Columns columns = new Columns("nnrllll");
     columns.add(ports ? "port" : "", "case", "line", "limit", "worst", "at", "allowed");
     for (CaseJudgement one : judgement.cases()) {
       String port = ports ? Visible.of(one.port().name()) : "";
@@ -123,7 +127,7 @@ final class FileText {
         name,
         Integer.toString(limit.line()),
         limit.criterion().words(),
-        worst.map(w -> Values.worst(limit, w)).orElse("–"),
+        worst.map(w -> Values.easierWorst(limit, w)).orElse("–"),
         worst.map(w -> Impedances.frequency(w.hz())).orElse("–"),
         Values.shortBound(limit));
   }

@@ -71,6 +71,10 @@ final class Json {
     json.writeEndArray();
     if (findings.size() > FindingPrinter.MOST_SHOWN) {
       json.writeNumberField("more_diagnostics", findings.size() - FindingPrinter.MOST_SHOWN);
+      Optional<Finding> stop = FindingPrinter.findStop(findings);
+      if (stop.isPresent()) {
+        json.writeNumberField("not_read_from_line", stop.get().place().line());
+      }
     }
   }
 

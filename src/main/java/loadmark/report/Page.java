@@ -66,7 +66,7 @@ final class Page {
   }
 
   void labelled(@Nullable Outcome outcome, String label, String rest) {
-    int column = Math.max(LABEL, label.length() + 2);
+    int column = Math.max(LABEL, label.length() + 1);
     boolean first = true;
     for (String line : wrap(rest, room() - INDENT.length() - column)) {
       String left = INDENT + Visible.pad(first ? label : "", column);

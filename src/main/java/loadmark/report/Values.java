@@ -35,6 +35,24 @@ final class Values {
         : value;
   }
 
+  /** The worst value; for a limit in percent or ohm the one that is nearer to being kept. */
+  static String easierWorst(Limit limit, Worst worst) {
+    Bound bound = limit.bound();
+    if (bound.atMost().isEmpty() || bound.atMostOhm().isEmpty()) {
+      return worst(limit, worst);
+    }
+    double relative = part(worst.value(), bound.atMost().getAsDouble());
+    double ohm = part(worst.valueOhm(), bound.atMostOhm().getAsDouble());
+    return ohm < relative
+        ? value(Unit.OHM, worst.valueOhm(), OptionalDouble.empty(), bound.atMostOhm())
+        : value(Unit.of(limit), worst.value(), bound.atLeast(), bound.atMost());
+  }
+
+  /** The share of the bound; a value without bound is past any. */
+  private static double part(OptionalDouble value, double bound) {
+    return value.isEmpty() ? Double.POSITIVE_INFINITY : value.getAsDouble() / bound;
+  }
+
   private static String value(
       Unit unit, OptionalDouble value, OptionalDouble atLeast, OptionalDouble atMost) {
     return value.isEmpty()

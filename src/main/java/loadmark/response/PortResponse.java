@@ -11,4 +11,9 @@ public interface PortResponse {
 
   /** With {@code loads} on, against {@code against} on; both may be empty. */
   Comparison compare(List<Load> loads, List<Load> against);
+
+  /** Where a criterion of the same comparison has a level; without algebra there is an obstacle. */
+  default Crossings crossings(List<Load> loads, List<Load> against) {
+    return Crossings.none("the laws of its parts are not known as constants");
+  }
 }

@@ -18,16 +18,8 @@ import org.apache.commons.math3.complex.Complex;
  * @param zeros the same
  */
 public record PortRoots(List<Complex> poles, List<Complex> zeros) {
-  /** Shifts a decade apart know their eigenvalues to within a factor of 3 of themselves best. */
-  private static final double STEP = 10;
-
-  /**
-   * Two shifts that both claim an eigenvalue at their border differ by less than this, relative.
-   */
-  private static final double SAME = 1e-5;
-
-  /** How far beyond its border a shift claims. */
-  private static final double OVERLAP = 1.001;
+  /** How far apart two frequencies far below all others are. */
+  private static final double DECADE = 10;
 
   /** A pole and a zero nearer than this, relative, are looked at more closely. */
   private static final double CLOSE = 1e-3;
@@ -50,8 +42,8 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
   static PortRoots of(Circuit circuit) {
     double margin = 10.0 * (1 + circuit.elements().size());
     Rates range = Rates.of(circuit).widened(margin);
-    List<Complex> poles = eigenvalues(circuit, range);
-    List<Complex> zeros = eigenvalues(circuit.withPortShort(), range);
+    List<Complex> poles = NaturalFrequencies.of(circuit, range);
+    List<Complex> zeros = NaturalFrequencies.of(circuit.withPortShort(), range);
     List<Complex> seenPoles = new ArrayList<>();
     List<Complex> seenZeros = new ArrayList<>();
     for (Complex pole : poles) {
@@ -71,36 +63,6 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
   private static List<Complex> sorted(List<Complex> roots) {
     roots.sort(Comparator.comparingDouble(Complex::abs).thenComparing(Complex::getImaginary));
     return roots;
-  }
-
-  /** The eigenvalues in the range, each from the shift next to it. */
-  private static List<Complex> eigenvalues(Circuit circuit, Rates range) {
-    List<Complex> found = new ArrayList<>();
-    if (circuit.reactive() == 0) {
-      return found;
-    }
-    double half = Math.sqrt(STEP);
-    for (double s0 = range.slowest(); s0 < range.fastest() * STEP; s0 *= STEP) {
-      List<Complex> before = List.copyOf(found);
-      for (Complex zeta : Eigenvalues.of(WaveRealisation.of(circuit, s0).a())) {
-        Complex s = fromZeta(zeta, s0);
-        double ratio = s.abs() / s0;
-        boolean mine = 1 / half <= ratio * OVERLAP && ratio < half * OVERLAP;
-        boolean border = ratio * half < OVERLAP * OVERLAP;
-        if (mine && !(border && before.stream().anyMatch(b -> distance(b, s) < SAME))) {
-          found.add(s);
-        }
-      }
-    }
-    return found;
-  }
-
-  static Complex fromZeta(Complex zeta, double s0) {
-    return zeta.add(1).divide(zeta.subtract(1)).multiply(s0);
-  }
-
-  private static double distance(Complex a, Complex b) {
-    return a.subtract(b).abs() / b.abs();
   }
 
   /** Whether what the port shows has a pole there, by its residue on a small circle. */
@@ -128,7 +90,7 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
 
   private static double nearest(Complex root, List<Complex> others, double beyond) {
     return others.stream()
-        .mapToDouble(other -> distance(other, root))
+        .mapToDouble(other -> NaturalFrequencies.distance(other, root))
         .filter(d -> d >= beyond)
         .min()
         .orElse(Double.POSITIVE_INFINITY);
@@ -137,11 +99,11 @@ public record PortRoots(List<Complex> poles, List<Complex> zeros) {
   /** A root at 0 shows in how Z goes at small real frequencies, where it is known best. */
   private static void addRootAtZero(
       Circuit circuit, double low, List<Complex> poles, List<Complex> zeros) {
-    double near = real(circuit, low / STEP);
+    double near = real(circuit, low / DECADE);
     double far = real(circuit, low);
-    if (near > far * STEP / 2) {
+    if (near > far * DECADE / 2) {
       poles.add(Complex.ZERO);
-    } else if (near < far / STEP * 2) {
+    } else if (near < far / DECADE * 2) {
       zeros.add(Complex.ZERO);
     }
   }

@@ -12,7 +12,11 @@ public final class Responses {
 
   /** The response of one port of the network, every other port closed. */
   public static PortResponse of(Network network, Port port) {
-    if (!network.ports().contains(port)) {
+    boolean found = false;
+    for (Port own : network.ports()) {
+      found |= own.name().equals(port.name());
+    }
+    if (!found) {
       throw new IllegalArgumentException("no port " + port.name() + " in " + network.title());
     }
     Equations equations = Equations.of(network, port, false);
@@ -21,6 +25,11 @@ public final class Responses {
       @Override
       public Comparison compare(List<Load> loads, List<Load> against) {
         return new SolvedComparison(equations, atDc, List.copyOf(loads), List.copyOf(against));
+      }
+
+      @Override
+      public Crossings crossings(List<Load> loads, List<Load> against) {
+        return Crossings.of(network, port, loads, against);
       }
     };
   }

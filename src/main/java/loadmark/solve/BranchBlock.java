@@ -13,7 +13,6 @@ final class BranchBlock {
   private static final double FILL = 8;
 
   /** Writes the branches that are given. */
-  @FunctionalInterface
   interface Source {
     void write(int branch, double[] re, double[] im);
   }

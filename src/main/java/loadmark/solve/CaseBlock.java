@@ -33,14 +33,19 @@ final class CaseBlock {
 
   private static final double MOST_ERROR = 1e-10;
 
+  /**
+   * A smaller change, behind thousands of decibels, is left at 0 with an unknown relative error:
+   * its factors may have left the range of a double.
+   */
+  private static final double NO_CHANGE = 0x1p-400;
+
   private final CasePlan plan;
   private final boolean estimates;
   private final LawBlock laws;
   private final BranchBlock main;
   private final Algebra algebra;
   private final PlaceBlock[] places;
-  private final Standing[] without;
-  private final Standing[] with;
+  private final Standing.Pair[] pairs;
   private final double[] largestShare;
   private final Powers stars;
   private final Powers elements;
@@ -57,8 +62,7 @@ final class CaseBlock {
     for (int i = 0; i < places.length; i++) {
       places[i] = new PlaceBlock(plan.reductions.get(i), algebra, size, estimates);
     }
-    without = new Standing[plan.network.places().size()];
-    with = new Standing[without.length];
+    pairs = new Standing.Pair[plan.network.places().size()];
     largestShare = new double[size];
     stars = new Powers(size);
     elements = new Powers(size);
@@ -106,10 +110,27 @@ final class CaseBlock {
   }
 
   private void stand(double[] values, int n) {
-    for (int i = 0; i < without.length; i++) {
+    for (int i = 0; i < pairs.length; i++) {
       ChangedPlace place = plan.network.places().get(i);
-      without[i] = standing(place.without(), place.series(), values, n);
-      with[i] = standing(place.with(), place.series(), values, n);
+      Standing without = standing(place.without(), place.series(), values, n);
+      Standing with = standing(place.with(), place.series(), values, n);
+      Tracked difference;
+      if (!place.isDifference()) {
+        difference =
+            algebra.minus(
+                algebra.times(with.n(), without.d()), algebra.times(without.n(), with.d()));
+      } else if (place.series()) {
+        difference =
+            algebra.minus(
+                standing(place.added(), true, values, n).n(),
+                standing(place.removed(), true, values, n).n());
+      } else {
+        difference =
+            algebra.minus(
+                standing(place.removed(), false, values, n).d(),
+                standing(place.added(), false, values, n).d());
+      }
+      pairs[i] = new Standing.Pair(without, with, difference);
     }
   }
 
@@ -158,16 +179,16 @@ final class CaseBlock {
     Tracked yWith = null;
     Tracked fall = null;
     for (int i = 0; i <= last; i++) {
-      int place = plan.reductions.get(i).place();
-      places[i].reduce(main, without, with, largestShare, n);
-      PlaceBlock.Side before = places[i].with(without[place]);
-      PlaceBlock.Side after = places[i].with(with[place]);
-      fall = algebra.plus(fall, places[i].fall(before, without[place], after, with[place]));
+      Standing.Pair pair = pairs[plan.reductions.get(i).place()];
+      places[i].reduce(main, pairs, largestShare, n);
+      PlaceBlock.Side before = places[i].with(pair.without());
+      PlaceBlock.Side after = places[i].with(pair.with());
+      fall = algebra.plus(fall, places[i].fall(before, after, pair));
       yWithout = i == 0 ? before.admittance() : yWithout;
       yWith = after.admittance();
       if (estimates) {
         own.clear(n);
-        places[i].trace(before, without[place], after, with[place], own);
+        places[i].trace(before, after, pair, own);
         Kernels.add(stars.change, own.change, n);
         if (i == 0) {
           Kernels.add(stars.without, own.without, n);
@@ -179,7 +200,11 @@ final class CaseBlock {
     }
     if (estimates) {
       for (int i = 0; i < plan.terminals.length; i++) {
-        main.node(plan.terminals[i]).set(places[0].node(i), places[last].node(i), n);
+        NodeBlock node = main.node(plan.terminals[i]);
+        node.copy(places[0].node(i), n);
+        for (int k = 1; k <= last; k++) {
+          node.append(places[k].node(i), n);
+        }
       }
       trace(values, n);
     }
@@ -212,13 +237,17 @@ final class CaseBlock {
     to.copy(z.re, z.im, from, n);
     double[] error = to.error();
     if (error != null) {
-      judge(y, lost, given, error, from, n, doubtful);
+      judge(y, y, 0, lost, given, error, from, n, doubtful);
     }
   }
 
-  /** The relative error of a number and whether it is small enough. */
+  /**
+   * The relative error of a number, and whether it is small enough or the result next to nothing.
+   */
   private static void judge(
       Tracked what,
+      Tracked result,
+      double nothing,
       double[] lost,
       double[] given,
       double[] error,
@@ -230,6 +259,7 @@ final class CaseBlock {
       double sum = (lost[i] + given[i]) / abs;
       error[from + i] = (QUOTIENT + what.error[i] + 1.5 * sum) * UNIT;
       boolean good = lost[i] <= MOST_GROWTH * (given[i] + abs) && error[from + i] <= MOST_ERROR;
+      good |= Math.abs(result.re[i]) + Math.abs(result.im[i]) < nothing;
       doubtful[from + i] |= !good;
     }
   }
@@ -244,9 +274,14 @@ final class CaseBlock {
     to.change().copy(ratio.re, ratio.im, from, n);
     double[] error = to.change().error();
     if (error != null) {
-      judge(fall, stars.change, elements.change, error, from, n, doubtful);
+      judge(fall, ratio, NO_CHANGE, stars.change, elements.change, error, from, n, doubtful);
       for (int i = from; i < from + n; i++) {
         error[i] += to.with().error(i);
+      }
+    }
+    for (int i = 0; i < n; i++) {
+      if (Math.abs(ratio.re[i]) + Math.abs(ratio.im[i]) < NO_CHANGE) {
+        to.change().set(from + i, 0, 0, Double.POSITIVE_INFINITY);
       }
     }
   }

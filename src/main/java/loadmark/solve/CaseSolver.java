@@ -21,7 +21,8 @@ public final class CaseSolver {
   private final Storage storage;
   private final int block;
   private final GeneralPath general;
-  private final AtomicReference<@Nullable CaseBlock> idle = new AtomicReference<>();
+  private final AtomicReference<@Nullable CaseBlock> idleOne = new AtomicReference<>();
+  private final AtomicReference<@Nullable CaseBlock> idleBlock = new AtomicReference<>();
 
   /** With error estimates. */
   public CaseSolver(ComparedNetwork network) {
@@ -58,21 +59,25 @@ public final class CaseSolver {
     }
     for (int i = 0; i < doubtful.length; i++) {
       if (doubtful[i]) {
-        general.solve(values, s, i, to);
+        Solutions again = Solutions.of(1, true);
+        if (general.solve(values, s, i, again)) {
+          to.improve(i, again);
+        } else {
+          to.setUndetermined(i);
+        }
       }
     }
     return to;
   }
 
   private void solve(double[] values, Frequencies s, Solutions to, boolean[] doubtful) {
-    int size = Math.min(block, s.size());
-    CaseBlock found = size == block ? idle.getAndSet(null) : null;
+    int size = s.size() == 1 ? 1 : block;
+    AtomicReference<@Nullable CaseBlock> idle = s.size() == 1 ? idleOne : idleBlock;
+    CaseBlock found = idle.getAndSet(null);
     CaseBlock work = found == null ? new CaseBlock(plan, storage, size, estimates) : found;
     for (int from = 0; from < s.size(); from += size) {
       work.solve(values, s, from, Math.min(size, s.size() - from), to, doubtful);
     }
-    if (size == block) {
-      idle.set(work);
-    }
+    idle.set(work);
   }
 }

@@ -187,24 +187,51 @@ final class GeneralPath {
     /** Solves for what the port answers; false if nothing does. */
     boolean solve() {
       int answer = driven ? port : unknown[ComparedNetwork.PLUS];
-      solution = system.solve(port);
-      factors = solution == null ? null : system.solveTransposed(answer);
-      if (solution == null || factors == null) {
-        return false;
+      solution = system.solve(system.unit(port));
+      factors = solution == null ? null : system.solveTransposed(system.unit(answer));
+      error = rounding(solution, factors);
+      return solution != null && factors != null;
+    }
+
+    /** What rounding can do to yᵀ·M·x. */
+    private double rounding(WideComplex @Nullable [] x, WideComplex @Nullable [] y) {
+      if (x == null || y == null) {
+        return Double.POSITIVE_INFINITY;
       }
+      double dense = system.size() * system.rounding(x, y);
+      return UNIT * (dense + graph.rounding(nodes(x), nodes(y)));
+    }
+
+    /** The part of a vector that belongs to nodes, re and im in turn, for all nodes. */
+    private double[] nodes(WideComplex[] of) {
       double[] volts = new double[2 * unknown.length];
-      double[] multipliers = new double[2 * unknown.length];
       for (int i = 0; i < unknown.length; i++) {
         if (unknown[i] >= 0) {
-          volts[2 * i] = solution[unknown[i]].re().hi();
-          volts[2 * i + 1] = solution[unknown[i]].im().hi();
-          multipliers[2 * i] = factors[unknown[i]].re().hi();
-          multipliers[2 * i + 1] = factors[unknown[i]].im().hi();
+          volts[2 * i] = of[unknown[i]].re().hi();
+          volts[2 * i + 1] = of[unknown[i]].im().hi();
         }
       }
-      double dense = system.size() * system.rounding(solution, factors);
-      error = UNIT * (dense + graph.rounding(volts, multipliers));
-      return true;
+      return volts;
+    }
+
+    /** The error of d·V − n·I at a place. */
+    double errorOfMiss(ChangedPlace place, int k, WideStanding of) {
+      WideComplex[] wanted = system.zeros();
+      set(wanted, unknown[place.first()], of.d);
+      set(wanted, unknown[place.second()], of.d.negate());
+      wanted[firstPlace + k] = of.n.negate();
+      return rounding(solution, system.solveTransposed(wanted));
+    }
+
+    private static void set(WideComplex[] vector, int i, WideComplex value) {
+      if (i >= 0) {
+        vector[i] = value;
+      }
+    }
+
+    /** The error of the multiplier of a place's equation. */
+    double errorOfFactor(int k) {
+      return rounding(system.solve(system.unit(firstPlace + k)), factors);
     }
 
     WideComplex answer() {
@@ -248,8 +275,13 @@ final class GeneralPath {
         : new WideStanding(WideComplex.ONE, y);
   }
 
-  /** Solves at one frequency and writes what it finds. */
-  void solve(double[] values, Frequencies s, int i, Solutions to) {
+  /**
+   * Solves at one frequency.
+   *
+   * @param to of one frequency
+   * @return whether every value was of a size that can be worked with
+   */
+  boolean solve(double[] values, Frequencies s, int i, Solutions to) {
     WideLaw laws = new WideLaw(values, s, i);
     double re = s.re()[i];
     double im = s.im()[i];
@@ -258,46 +290,43 @@ final class GeneralPath {
     boolean foundWithout = without.solve();
     boolean foundWith = with == without ? foundWithout : with.solve();
     if (!laws.isInRange()) {
-      to.without().set(i, Solutions.State.UNDETERMINED);
-      to.with().set(i, Solutions.State.UNDETERMINED);
-      to.change().set(i, Solutions.State.UNDETERMINED);
-      return;
+      return false;
     }
-    writeImpedance(
-        foundWithout ? without : new Network(laws, re, im, false, false), to.without(), i);
-    writeImpedance(foundWith ? with : new Network(laws, re, im, true, false), to.with(), i);
+    writeImpedance(foundWithout ? without : new Network(laws, re, im, false, false), to.without());
+    writeImpedance(foundWith ? with : new Network(laws, re, im, true, false), to.with());
     if (foundWithout && foundWith) {
-      writeChange(without, with, to.change(), i);
+      writeChange(laws, without, with, to.change());
     } else {
-      to.change().set(i, Solutions.State.UNDETERMINED);
+      to.change().set(0, Solutions.State.UNDETERMINED);
     }
-    Solutions.decide(to, i);
+    to.decide();
+    return true;
   }
 
-  private static void writeImpedance(Network network, Solutions.Quantity to, int i) {
+  private static void writeImpedance(Network network, Solutions.Quantity to) {
     if (!network.driven && !network.solve()) {
-      to.set(i, Solutions.State.UNDETERMINED);
+      to.set(0, Solutions.State.UNDETERMINED);
       return;
     }
     WideComplex answer = network.answer();
     boolean nothing = answer.size() <= MARGIN * network.error;
     double error = FINAL_ROUNDING + MARGIN * network.error / answer.size();
     if (nothing && network.driven) {
-      to.set(i, Solutions.State.INFINITE);
+      to.set(0, Solutions.State.INFINITE);
     } else if (nothing) {
-      to.set(i, 0, 0, 0);
+      to.set(0, 0, 0, 0);
     } else {
-      write(network.driven ? answer.inverse() : answer, error, to, i);
+      write(network.driven ? answer.inverse() : answer, error, to);
     }
   }
 
-  private static void write(WideComplex value, double error, Solutions.Quantity to, int i) {
+  private static void write(WideComplex value, double error, Solutions.Quantity to) {
     double re = value.re().hi();
     double im = value.im().hi();
     if (Double.isFinite(re) && Double.isFinite(im) && error < 1) {
-      to.set(i, re, im, error);
+      to.set(0, re, im, error);
     } else {
-      to.set(i, Solutions.State.UNDETERMINED);
+      to.set(0, Solutions.State.UNDETERMINED);
     }
   }
 
@@ -305,31 +334,42 @@ final class GeneralPath {
    * With M·x = e in one network and M′·x′ = e in the other, and Mᵀ·λ = e of the port's current, Y′
    * − Y = −λᵀ·(M′ − M)·x′, where only the places' rows differ.
    */
-  private void writeChange(Network without, Network with, Solutions.Quantity to, int i) {
-    double lost = (relative(without) + relative(with) + UNIT) * MARGIN;
+  private void writeChange(WideLaw laws, Network without, Network with, Solutions.Quantity to) {
     WideComplex change = WideComplex.ZERO;
     double error = 0;
     for (int k = 0; k < network.places().size(); k++) {
       ChangedPlace place = network.places().get(k);
-      WideStanding standing = without.standings[k];
-      WideComplex volts = with.voltage(place);
-      WideComplex current = with.current(k);
+      WideStanding standing = weights(laws, place, without.standings[k]);
+      WideComplex volts = standing.d.times(with.voltage(place));
+      WideComplex current = standing.n.times(with.current(k));
       WideComplex factor = without.factor(k);
-      WideComplex misses = standing.d.times(volts).minus(standing.n.times(current));
-      change = change.plus(factor.times(misses));
-      double d = standing.d.size();
-      double n = standing.n.size();
-      double around = place.series() ? without.answer().size() : 1;
-      error += around * (d * volts.size() + n * current.size());
-      error += factor.size() * (d * Math.max(1, volts.size()) + n * with.answer().size());
+      WideComplex miss = volts.minus(current);
+      change = change.plus(factor.times(miss));
+      double ofMiss = with.errorOfMiss(place, k, standing) + UNIT * (volts.size() + current.size());
+      error += factor.size() * ofMiss + miss.size() * without.errorOfFactor(k);
     }
-    WideComplex y = with.answer();
-    if (change.size() <= lost * error) {
-      to.set(i, 0, 0, change.isZero() && error == 0 ? 0 : Double.POSITIVE_INFINITY);
+    error *= MARGIN;
+    if (change.size() <= error) {
+      to.set(0, 0, 0, network.places().isEmpty() ? 0 : Double.POSITIVE_INFINITY);
     } else {
-      double relative = FINAL_ROUNDING + lost * error / change.size() + relative(with) * MARGIN;
-      write(change.over(y).negate(), relative, to, i);
+      double relative = FINAL_ROUNDING + error / change.size() + relative(with) * MARGIN;
+      write(change.over(with.answer()).negate(), relative, to);
     }
+  }
+
+  /** What to multiply V′ and I′ by so that what is common to both networks drops out. */
+  private static WideStanding weights(WideLaw laws, ChangedPlace place, WideStanding without) {
+    WideComplex removed =
+        place.series() ? laws.impedance(place.removed()) : laws.admittance(place.removed());
+    WideComplex added =
+        place.series() ? laws.impedance(place.added()) : laws.admittance(place.added());
+    if (removed == null || added == null) {
+      return without;
+    }
+    WideComplex difference = removed.minus(added);
+    return place.series()
+        ? new WideStanding(difference, WideComplex.ZERO)
+        : new WideStanding(WideComplex.ZERO, difference);
   }
 
   private static double relative(Network network) {

@@ -181,10 +181,10 @@ final class Kernels {
     }
   }
 
-  /** to = 1.5·to/(|re| + |im|) + 1, more than to/|z| + 1. */
+  /** to = 1.5·to/(|re| + |im|) + 1, more than to/|z| + 1; of nothing in nothing, 1. */
   static void relative(double[] to, double[] re, double[] im, int n) {
     for (int i = 0; i < n; i++) {
-      to[i] = 1.5 * to[i] / (Math.abs(re[i]) + Math.abs(im[i])) + 1;
+      to[i] = 1.5 * to[i] / (Math.abs(re[i]) + Math.abs(im[i]) + Double.MIN_NORMAL) + 1;
     }
   }
 

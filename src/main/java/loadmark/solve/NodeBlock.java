@@ -39,28 +39,37 @@ final class NodeBlock {
   }
 
   /** {@code null} is zero. */
-  void set(@Nullable Tracked without, @Nullable Tracked with, int n) {
-    clear(n);
-    if (without != null) {
-      System.arraycopy(without.re, 0, re, 0, n);
-      System.arraycopy(without.im, 0, im, 0, n);
-    }
-    if (with != null) {
-      System.arraycopy(with.re, 0, withRe, 0, n);
-      System.arraycopy(with.im, 0, withIm, 0, n);
-    }
-    Kernels.difference(changeRe, withRe, re, n);
-    Kernels.difference(changeIm, withIm, im, n);
+  void set(@Nullable Tracked without, @Nullable Tracked with, @Nullable Tracked change, int n) {
+    set(re, im, without, n);
+    set(withRe, withIm, with, n);
+    set(changeRe, changeIm, change, n);
   }
 
-  /** Without the loads as at one node, with them as at another. */
-  void set(NodeBlock without, NodeBlock with, int n) {
-    System.arraycopy(without.re, 0, re, 0, n);
-    System.arraycopy(without.im, 0, im, 0, n);
-    System.arraycopy(with.withRe, 0, withRe, 0, n);
-    System.arraycopy(with.withIm, 0, withIm, 0, n);
-    Kernels.difference(changeRe, withRe, re, n);
-    Kernels.difference(changeIm, withIm, im, n);
+  private static void set(double[] re, double[] im, @Nullable Tracked to, int n) {
+    if (to == null) {
+      Arrays.fill(re, 0, n, 0);
+      Arrays.fill(im, 0, n, 0);
+    } else {
+      System.arraycopy(to.re, 0, re, 0, n);
+      System.arraycopy(to.im, 0, im, 0, n);
+    }
+  }
+
+  /** Goes on from one change to the next: the voltage with the loads is that of the last. */
+  void append(NodeBlock next, int n) {
+    System.arraycopy(next.withRe, 0, withRe, 0, n);
+    System.arraycopy(next.withIm, 0, withIm, 0, n);
+    Kernels.add(changeRe, next.changeRe, n);
+    Kernels.add(changeIm, next.changeIm, n);
+  }
+
+  void copy(NodeBlock other, int n) {
+    System.arraycopy(other.re, 0, re, 0, n);
+    System.arraycopy(other.im, 0, im, 0, n);
+    System.arraycopy(other.withRe, 0, withRe, 0, n);
+    System.arraycopy(other.withIm, 0, withIm, 0, n);
+    System.arraycopy(other.changeRe, 0, changeRe, 0, n);
+    System.arraycopy(other.changeIm, 0, changeIm, 0, n);
   }
 
   /** Adds a neighbour's voltage by its share of the star. */

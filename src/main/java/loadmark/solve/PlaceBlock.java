@@ -26,8 +26,12 @@ final class PlaceBlock {
    */
   record Side(@Nullable Tracked admittance, Tracked share, Tracked below) {}
 
-  /** A node of the place that is not of the port: its voltage is (n·open + d·joined)/D. */
-  private record Inner(int node, @Nullable Tracked open, @Nullable Tracked joined) {}
+  /**
+   * A node of the place that is not of the port: its voltage is (n·open + d·joined)/D, and it
+   * changes by (n′·d − n·d′)·swing·N/(D·D′).
+   */
+  private record Inner(
+      int node, @Nullable Tracked open, @Nullable Tracked joined, @Nullable Tracked swing) {}
 
   private final PlaceReduction reduction;
   private final BranchBlock branches;
@@ -50,15 +54,16 @@ final class PlaceBlock {
   }
 
   /** Takes over what the main elimination has left and reduces it. */
-  void reduce(
-      BranchBlock main,
-      Standing[] without,
-      Standing[] with,
-      double[] largestShare,
-      int frequencies) {
+  void reduce(BranchBlock main, Standing.Pair[] pairs, double[] largestShare, int frequencies) {
     n = frequencies;
-    branches.eliminate(
-        (branch, re, im) -> gather(branch, re, im, main, without, with), largestShare, n);
+    BranchBlock.Source source =
+        new BranchBlock.Source() {
+          @Override
+          public void write(int branch, double[] re, double[] im) {
+            gather(branch, re, im, main, pairs);
+          }
+        };
+    branches.eliminate(source, largestShare, n);
     inners.clear();
     int plus = reduction.plus();
     int minus = reduction.minus();
@@ -76,14 +81,14 @@ final class PlaceBlock {
   }
 
   private void gather(
-      int branch, double[] re, double[] im, BranchBlock main, Standing[] without, Standing[] with) {
+      int branch, double[] re, double[] im, BranchBlock main, Standing.Pair[] pairs) {
     boolean first = true;
     for (PlaceReduction.Input input : reduction.inputs(branch)) {
       double[] fromRe;
       double[] fromIm;
       if (input.isPlace()) {
-        boolean changed = input.from() < reduction.place();
-        Standing other = changed ? with[input.from()] : without[input.from()];
+        Standing.Pair pair = pairs[input.from()];
+        Standing other = input.from() < reduction.place() ? pair.with() : pair.without();
         Tracked y = requireNonNull(algebra.over(other.d(), requireNonNull(other.n())));
         fromRe = y.re;
         fromIm = y.im;
@@ -129,7 +134,11 @@ final class PlaceBlock {
     openBelow = algebra.plus(toFar, across);
     joinedBelow = algebra.one();
     drive = toFar;
-    inners.add(new Inner(inner, atPlus ? across : toFar, atPlus ? algebra.one() : null));
+    Tracked one = algebra.one();
+    inners.add(
+        atPlus
+            ? new Inner(inner, across, one, algebra.minus(null, one))
+            : new Inner(inner, toFar, null, one));
   }
 
   private void apart(int a, int b) {
@@ -150,8 +159,10 @@ final class PlaceBlock {
     openTop = algebra.plus(algebra.plus(throughA, throughB), algebra.times(across, joinedTop));
     drive = algebra.minus(algebra.times(plusA, minusB), algebra.times(plusB, minusA));
     Tracked over = algebra.times(across, atPlus);
-    inners.add(new Inner(a, algebra.plus(algebra.times(plusA, atB), over), atPlus));
-    inners.add(new Inner(b, algebra.plus(algebra.times(plusB, atA), over), atPlus));
+    inners.add(new Inner(a, algebra.plus(algebra.times(plusA, atB), over), atPlus, atB));
+    inners.add(
+        new Inner(
+            b, algebra.plus(algebra.times(plusB, atA), over), atPlus, algebra.minus(null, atA)));
   }
 
   /** What the port shows with this at the place. */
@@ -170,21 +181,26 @@ final class PlaceBlock {
    * By how much the admittance falls from one thing at the place to another; {@code null} where
    * nothing changes.
    */
-  @Nullable Tracked fall(Side from, Standing before, Side to, Standing after) {
-    Tracked difference =
-        algebra.minus(algebra.times(after.n(), before.d()), algebra.times(before.n(), after.d()));
-    return algebra.times(algebra.times(from.share(), to.share()), difference);
+  @Nullable Tracked fall(Side before, Side after, Standing.Pair pair) {
+    return algebra.times(algebra.times(before.share(), after.share()), pair.difference());
   }
 
   /**
    * Finds the voltages of all nodes of the reduction, and adds what the roundings of its
    * eliminations do to the port's admittance.
    */
-  void trace(Side from, Standing before, Side to, Standing after, Powers powers) {
+  void trace(Side before, Side after, Standing.Pair pair, Powers powers) {
     branches.node(reduction.plus()).set(1, n);
     branches.node(reduction.minus()).set(0, n);
+    Tracked swing = algebra.over(algebra.times(before.share(), pair.difference()), after.below());
     for (Inner inner : inners) {
-      branches.node(inner.node()).set(volts(inner, before, from), volts(inner, after, to), n);
+      branches
+          .node(inner.node())
+          .set(
+              volts(inner, pair.without(), before),
+              volts(inner, pair.with(), after),
+              algebra.times(swing, inner.swing()),
+              n);
     }
     branches.trace(powers, n);
   }

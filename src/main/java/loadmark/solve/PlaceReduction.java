@@ -40,7 +40,9 @@ final class PlaceReduction {
     this.place = place;
     int size = terminals.length;
     node = new int[size];
-    Arrays.setAll(node, i -> i);
+    for (int i = 0; i < size; i++) {
+      node[i] = i;
+    }
     List<ChangedPlace> places = network.places();
     for (int i = 0; i < places.size(); i++) {
       if (i != place && network.between(place, i) == Law.Fixed.JOINED) {

@@ -19,25 +19,36 @@ public record Solutions(Quantity without, Quantity with, Quantity change) {
         new Quantity(size, estimates));
   }
 
-  /** Settles the change where an impedance is 0, infinite or undetermined. */
-  static void decide(Solutions to, int i) {
-    Quantity without = to.without;
-    Quantity with = to.with;
-    if (without.isUndetermined(i) || with.isUndetermined(i)) {
-      to.change.set(i, State.UNDETERMINED);
-    } else if (without.state(i) == State.INFINITE) {
-      if (with.state(i) == State.INFINITE) {
-        to.change.set(i, State.UNDETERMINED);
+  /** Of one frequency: settles the change where an impedance is 0, infinite or undetermined. */
+  void decide() {
+    if (without.isUndetermined() || with.isUndetermined()) {
+      change.set(0, State.UNDETERMINED);
+    } else if (without.isInfinite()) {
+      if (with.isInfinite()) {
+        change.set(0, State.UNDETERMINED);
       } else {
-        to.change.set(i, -1, 0, 0);
+        change.set(0, -1, 0, 0);
       }
-    } else if (without.isZero(i)) {
-      to.change.set(i, with.isZero(i) ? State.UNDETERMINED : State.INFINITE);
-    } else if (with.state(i) == State.INFINITE) {
-      to.change.set(i, State.INFINITE);
-    } else if (with.isZero(i)) {
-      to.change.set(i, -1, 0, 0);
+    } else if (without.isZero()) {
+      change.set(0, with.isZero() ? State.UNDETERMINED : State.INFINITE);
+    } else if (with.isInfinite()) {
+      change.set(0, State.INFINITE);
+    } else if (with.isZero()) {
+      change.set(0, -1, 0, 0);
     }
+  }
+
+  /** Takes over what another found at its only frequency, unless it is no better. */
+  void improve(int i, Solutions other) {
+    without.improve(i, other.without);
+    with.improve(i, other.with);
+    change.improve(i, other.change);
+  }
+
+  void setUndetermined(int i) {
+    without.set(i, State.UNDETERMINED);
+    with.set(i, State.UNDETERMINED);
+    change.set(i, State.UNDETERMINED);
   }
 
   /** What is known of a number. */
@@ -49,6 +60,9 @@ public record Solutions(Quantity without, Quantity with, Quantity change) {
 
   /** A complex number at each frequency. The arrays are for the one who asked. */
   public static final class Quantity {
+    /** With a larger one a number is no better than none. */
+    private static final double USEFUL_ERROR = 1e-6;
+
     /** Where it is not finite; no array while all are. */
     private State @Nullable [] state;
 
@@ -60,6 +74,9 @@ public record Solutions(Quantity without, Quantity with, Quantity change) {
       re = new double[size];
       im = new double[size];
       error = estimates ? new double[size] : null;
+      if (error != null) {
+        Arrays.fill(error, Double.POSITIVE_INFINITY);
+      }
     }
 
     /** What is known at a frequency. */
@@ -82,12 +99,27 @@ public record Solutions(Quantity without, Quantity with, Quantity change) {
       return error == null ? Double.POSITIVE_INFINITY : error[i];
     }
 
-    boolean isUndetermined(int i) {
-      return state(i) == State.UNDETERMINED;
+    private boolean isUndetermined() {
+      return state(0) == State.UNDETERMINED;
     }
 
-    boolean isZero(int i) {
-      return state(i) == State.FINITE && re[i] == 0 && im[i] == 0;
+    private boolean isInfinite() {
+      return state(0) == State.INFINITE;
+    }
+
+    private boolean isZero() {
+      return state(0) == State.FINITE && re[0] == 0 && im[0] == 0;
+    }
+
+    private void improve(int i, Quantity other) {
+      if (error != null && error[i] < USEFUL_ERROR && error[i] <= other.error(0)) {
+        return;
+      }
+      if (other.state(0) == State.FINITE) {
+        set(i, other.re[0], other.im[0], other.error(0));
+      } else {
+        set(i, other.state(0));
+      }
     }
 
     double @Nullable [] error() {

@@ -41,6 +41,9 @@ final class WideGraph {
   private final List<WideComplex> admittances = new ArrayList<>();
   private final List<Star> stars = new ArrayList<>();
 
+  /** The sizes of all that was added up in each branch. */
+  private double[] terms = new double[16];
+
   WideGraph(int nodes) {
     around = new int[nodes][4];
     branch = new int[nodes][4];
@@ -51,11 +54,18 @@ final class WideGraph {
   void add(int a, int b, WideComplex y) {
     int number = find(a, b);
     if (number >= 0) {
-      admittances.set(number, admittances.get(number).plus(y));
+      WideComplex sum = admittances.get(number).plus(y);
+      terms[number] += y.size();
+      boolean nothing = sum.size() <= WideLaw.NOTHING * terms[number];
+      admittances.set(number, nothing ? WideComplex.ZERO : sum);
       return;
     }
     attach(a, b);
     attach(b, a);
+    if (admittances.size() == terms.length) {
+      terms = Arrays.copyOf(terms, 2 * terms.length);
+    }
+    terms[admittances.size()] = y.size();
     admittances.add(y);
   }
 
@@ -119,7 +129,7 @@ final class WideGraph {
       sum = sum.plus(y);
       sizes += y.size();
     }
-    if (size > 0 && !(sizes <= MOST_GROWTH * sum.size())) {
+    if (sizes > 0 && !(sizes <= MOST_GROWTH * sum.size())) {
       return false;
     }
     Star star = new Star(node, Arrays.copyOf(around[node], size));
@@ -128,15 +138,18 @@ final class WideGraph {
       detach(neighbour, node);
     }
     degree[node] = 0;
-    WideComplex inverse = size > 0 ? sum.inverse() : WideComplex.ZERO;
+    WideComplex inverse = sizes > 0 ? sum.inverse() : WideComplex.ZERO;
     for (int i = 0; i < size; i++) {
       WideComplex y = admittances.get(members[i]);
       WideComplex share = y.times(inverse);
       star.shareRe[i] = share.re().hi();
       star.shareIm[i] = share.im().hi();
-      star.rounding[i] = (FILL + size) * y.size() * sizes / sum.size();
+      star.rounding[i] = y.isZero() ? 0 : (FILL + size) * y.size() * sizes / sum.size();
       for (int j = i + 1; j < size; j++) {
-        add(star.neighbours[i], star.neighbours[j], share.times(admittances.get(members[j])));
+        WideComplex fill = share.times(admittances.get(members[j]));
+        if (!fill.isZero()) {
+          add(star.neighbours[i], star.neighbours[j], fill);
+        }
       }
     }
     stars.add(star);

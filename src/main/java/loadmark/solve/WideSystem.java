@@ -120,9 +120,9 @@ final class WideSystem {
     order[b] = kept;
   }
 
-  /** x with M·x = e of one equation; {@code null} if there is none. */
-  WideComplex @Nullable [] solve(int equation) {
-    WideComplex[] known = unit(row, equation);
+  /** x with M·x = b; {@code null} if there is none. */
+  WideComplex @Nullable [] solve(WideComplex[] b) {
+    WideComplex[] known = permute(b, row);
     double[] sizes = sizes(known);
     for (int i = 0; i < size; i++) {
       for (int j = 0; j < Math.min(i, rank); j++) {
@@ -142,9 +142,9 @@ final class WideSystem {
     return solution;
   }
 
-  /** x with Mᵀ·x = e of one unknown; {@code null} if there is none. */
-  WideComplex @Nullable [] solveTransposed(int unknown) {
-    WideComplex[] known = unit(column, unknown);
+  /** x with Mᵀ·x = c; {@code null} if there is none. */
+  WideComplex @Nullable [] solveTransposed(WideComplex[] c) {
+    WideComplex[] known = permute(c, column);
     double[] sizes = sizes(known);
     for (int i = 0; i < size; i++) {
       for (int j = 0; j < Math.min(i, rank); j++) {
@@ -170,12 +170,17 @@ final class WideSystem {
     return solution;
   }
 
-  private WideComplex[] unit(int[] order, int of) {
-    WideComplex[] known = zeros();
-    for (int i = 0; i < size; i++) {
-      known[i] = order[i] == of ? WideComplex.ONE : WideComplex.ZERO;
-    }
-    return known;
+  private static WideComplex[] permute(WideComplex[] of, int[] order) {
+    WideComplex[] permuted = new WideComplex[of.length];
+    Arrays.setAll(permuted, i -> of[order[i]]);
+    return permuted;
+  }
+
+  /** A vector for one side of the system: 0 but for a 1. */
+  WideComplex[] unit(int at) {
+    WideComplex[] unit = zeros();
+    unit[at] = WideComplex.ONE;
+    return unit;
   }
 
   private static double[] sizes(WideComplex[] of) {
@@ -186,7 +191,7 @@ final class WideSystem {
     return sizes;
   }
 
-  private WideComplex[] zeros() {
+  WideComplex[] zeros() {
     WideComplex[] zeros = new WideComplex[size];
     Arrays.fill(zeros, WideComplex.ZERO);
     return zeros;

@@ -1,10 +1,12 @@
 package loadmark.study;
 
 import java.util.List;
+import java.util.Optional;
 import loadmark.network.Case;
 import loadmark.network.Network;
 import loadmark.network.Port;
 import loadmark.response.Loading;
+import loadmark.response.PortRoots;
 
 /**
  * The impedances of a network.
@@ -20,8 +22,13 @@ public record CurveTable(Network network, List<Curve> curves) {
    * One port in one case.
    *
    * @param points in rising frequency, or in the order asked for
+   * @param roots poles and zeros, where they are asked for and could be found
    */
-  public record Curve(Port port, Case shown, List<Loading> points) {
+  public record Curve(Port port, Case shown, List<Loading> points, Optional<PortRoots> roots) {
+    public Curve(Port port, Case shown, List<Loading> points) {
+      this(port, shown, points, Optional.empty());
+    }
+
     public Curve {
       points = List.copyOf(points);
     }

@@ -12,16 +12,18 @@ import java.util.Optional;
  * @param sets {@code NAME=VALUE}, each in place of a {@code let}
  * @param port the only port of interest
  * @param caseName the only case of interest
+ * @param poles whether a curve's poles and zeros are asked for
  */
 public record Request(
     Optional<String> sweep,
     Optional<String> at,
     List<String> sets,
     Optional<String> port,
-    Optional<String> caseName) {
+    Optional<String> caseName,
+    boolean poles) {
   public static final Request NOTHING =
       new Request(
-          Optional.empty(), Optional.empty(), List.of(), Optional.empty(), Optional.empty());
+          Optional.empty(), Optional.empty(), List.of(), Optional.empty(), Optional.empty(), false);
 
   public Request {
     sets = List.copyOf(sets);
@@ -35,6 +37,9 @@ public record Request(
     port.ifPresent(p -> options.add("--port " + p));
     caseName.ifPresent(c -> options.add("--case " + c));
     sets.forEach(s -> options.add("--set " + s));
+    if (poles) {
+      options.add("--poles");
+    }
     return options;
   }
 }

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Stream;
+import loadmark.allowance.Allowances;
 import loadmark.binding.Binder;
 import loadmark.binding.Overrides;
 import loadmark.binding.Purpose;
@@ -16,6 +17,7 @@ import loadmark.network.Case;
 import loadmark.network.Network;
 import loadmark.network.Port;
 import loadmark.response.PortResponse;
+import loadmark.response.PortRoots;
 import loadmark.response.Responses;
 import loadmark.study.CurveTable.Curve;
 import loadmark.syntax.Expression;
@@ -28,11 +30,14 @@ public final class Study {
   private final Overrides overrides;
   private final Selection selection;
   private final Optional<double[]> frequencies;
+  private final boolean poles;
 
-  private Study(Overrides overrides, Selection selection, Optional<double[]> frequencies) {
+  private Study(
+      Overrides overrides, Selection selection, Optional<double[]> frequencies, boolean poles) {
     this.overrides = overrides;
     this.selection = selection;
     this.frequencies = frequencies;
+    this.poles = poles;
   }
 
   /** Reads what is asked for; empty, with findings, where it makes no sense. */
@@ -46,7 +51,11 @@ public final class Study {
     return findings.hasErrors()
         ? Optional.empty()
         : Optional.of(
-            new Study(overrides, new Selection(request.port(), request.caseName()), frequencies));
+            new Study(
+                overrides,
+                new Selection(request.port(), request.caseName()),
+                frequencies,
+                request.poles()));
   }
 
   private static double[] readFrequencies(String at, Findings findings) {
@@ -55,6 +64,7 @@ public final class Study {
         .orElse(List.of())
         .stream()
         .mapToDouble(Double::doubleValue)
+        .distinct()
         .toArray();
   }
 
@@ -122,7 +132,7 @@ public final class Study {
     if (findings.hasErrors()) {
       return Optional.empty();
     }
-    CurveTable table = draw(network, hz.orElseThrow());
+    CurveTable table = draw(network, hz.orElseThrow(), source.text(), findings);
     if (table.countUndetermined() > 0) {
       findings.warning(
           "undetermined",
@@ -132,7 +142,35 @@ public final class Study {
     return Optional.of(table);
   }
 
-  private CurveTable draw(Network network, double[] hz) {
+  /** Text to how heavy each load may be; empty, with findings, where that cannot be said. */
+  public Optional<AllowanceTable> allow(Source source, Findings findings) {
+    NetworkFile file = NetworkReader.read(source.text(), findings);
+    Optional<Network> bound =
+        Binder.bind(file, overrides, Purpose.CHECK, findings)
+            .map(n -> select(n, source.text(), findings));
+    if (bound.isEmpty() || findings.hasErrors()) {
+      return Optional.empty();
+    }
+    Network network = bound.get();
+    List<Port> ports = network.ports().stream().filter(selection::wants).toList();
+    List<Case> cases = network.cases().stream().filter(selection::wants).toList();
+    AllowanceTable table =
+        new AllowanceTable(
+            network, new Allowances(network).all(ports, cases, AllowancePoints.of(network)));
+    if (table.allowances().isEmpty()) {
+      findings.error("no-load", source.text().whole(), "no case adds a load to its reference");
+      return Optional.empty();
+    }
+    if (table.countUndetermined() > 0) {
+      findings.warning(
+          "undetermined",
+          source.text().whole(),
+          "frequencies whose allowance could not be determined: " + table.countUndetermined());
+    }
+    return Optional.of(table);
+  }
+
+  private CurveTable draw(Network network, double[] hz, SourceText source, Findings findings) {
     List<Curve> curves = new ArrayList<>();
     for (Port port : network.ports().stream().filter(selection::wants).toList()) {
       PortResponse response = Responses.of(network, port);
@@ -141,8 +179,32 @@ public final class Study {
           .forEach(
               one ->
                   curves.add(
-                      new Curve(port, one, response.compare(one.loads(), one.against()).at(hz))));
+                      new Curve(
+                          port,
+                          one,
+                          response.compare(one.loads(), one.against()).at(hz),
+                          roots(network, port, one, source, findings))));
     }
     return new CurveTable(network, curves);
+  }
+
+  private Optional<PortRoots> roots(
+      Network network, Port port, Case one, SourceText source, Findings findings) {
+    if (!poles) {
+      return Optional.empty();
+    }
+    try {
+      return Optional.of(PortRoots.of(network, port, one.loads()));
+    } catch (ArithmeticException failed) {
+      findings.warning(
+          "no-poles",
+          source.whole(),
+          "the poles and zeros of case `"
+              + one.name()
+              + "` at port `"
+              + port.name()
+              + "` could not be found");
+      return Optional.empty();
+    }
   }
 }

@@ -81,6 +81,17 @@ final class LimitBuilder {
     if (from instanceof Expression.Toleranced around) {
       return new Window.Around(around);
     }
+    if (from instanceof Expression.Operation difference
+        && difference.operator() == Expression.Operator.MINUS) {
+      String window =
+          ExpressionText.of(difference.left()) + " to " + ExpressionText.of(difference.right());
+      findings.error(
+          "missing-bound",
+          difference.operatorSpan(),
+          "the ends of a window are joined by `to`",
+          "write " + Quoted.of(window));
+      return new Window.Between(difference.left(), difference.right());
+    }
     findings.error(
         "missing-bound",
         places.after(c.getStop()),

@@ -11,6 +11,7 @@ import java.util.stream.Stream;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.Nearest;
 import loadmark.syntax.antlr.NetworkParser;
+import org.antlr.v4.runtime.CommonToken;
 import org.antlr.v4.runtime.Token;
 
 /** What is found in the tokens of a line before the grammar is asked. */
@@ -57,7 +58,27 @@ final class LineCheck {
           "too-long", places.of(line.get(MOST_TOKENS)), "the statement is too long from here on");
       return false;
     }
+    readCommas(line);
     return tokensAreWhole(line) && bracketsClose(line);
+  }
+
+  /** A comma in place of a decimal point is reported, then read as one. */
+  private void readCommas(List<Token> line) {
+    for (Token token : line) {
+      if (token.getType() == NetworkParser.COMMA_NUMBER) {
+        String text = token.getText();
+        String whole = text.substring(0, text.indexOf(','));
+        String read = whole + "." + text.substring(whole.length() + 1).replaceAll("[.,].*", "");
+        findings.error(
+            "decimal-comma",
+            places.of(token),
+            "a comma in a number",
+            "the decimal sign is a point: write " + Quoted.cut(read));
+        CommonToken number = (CommonToken) token;
+        number.setType(NetworkParser.NUMBER);
+        number.setText(whole.contains(".") ? whole : read);
+      }
+    }
   }
 
   private boolean tokensAreWhole(List<Token> line) {

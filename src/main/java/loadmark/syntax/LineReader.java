@@ -109,6 +109,17 @@ final class LineReader {
         Words.declares(word) && line.size() > 1 && Words.isName(line.get(1))
             ? Optional.of(names.read(line.get(1)))
             : Optional.empty();
-    return new Statement.Broken(known ? word : "", declared, mentioned, places.firstLine(line));
+    if (!known && Words.isName(line.get(0))) {
+      mentioned.add(names.read(line.get(0)));
+    }
+    boolean nameless = Words.declares(word) && declared.isEmpty();
+    boolean told = known && (nameless || !mayHideStatements(line));
+    return new Statement.Broken(told ? word : "", declared, mentioned, places.firstLine(line));
+  }
+
+  /** Whether anything may stand in the line: in a quote that is not closed, or behind a `;`. */
+  private static boolean mayHideStatements(List<Token> line) {
+    return line.stream()
+        .anyMatch(t -> t.getType() == NetworkParser.UNCLOSED || t.getText().equals(";"));
   }
 }

@@ -5,6 +5,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import loadmark.diagnostic.Finding;
 import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.SourceReader;
 import loadmark.diagnostic.SourceText;
@@ -28,14 +29,14 @@ public final class NetworkReader {
     }
     Places places = new Places(source);
     Set<Integer> unreadable = findUnreadableLines(source, findings);
-    List<List<Token>> lines = LineJoiner.join(TokenReader.read(source, findings), places, findings);
+    List<List<Token>> lines = LineJoiner.join(TokenReader.read(source), places, findings);
     LineReader reader = new LineReader(places, findings);
     List<Statement> statements = new ArrayList<>();
     for (int i = 0; i < lines.size(); i++) {
       List<Token> line = lines.get(i);
       if (findings.errorCount() >= MOST_ERRORS) {
         findings.error(
-            "too-many",
+            Finding.READING_STOPS,
             places.of(line.get(0)),
             "too many errors: the file is not read from here on",
             "is it the right file?");
@@ -85,12 +86,12 @@ public final class NetworkReader {
     if (isTooLarge(source, findings) || !findUnreadableLines(source, findings).isEmpty()) {
       return Optional.empty();
     }
-    int before = findings.errorCount();
-    List<Token> tokens = TokenReader.read(source, findings);
+    List<Token> tokens = TokenReader.read(source);
     if (tokens.isEmpty()) {
       findings.error("missing-value", source.whole(), due + " is missing");
+      return Optional.empty();
     }
-    return findings.errorCount() > before ? Optional.empty() : Optional.of(tokens);
+    return Optional.of(tokens);
   }
 
   private static boolean isTooLarge(SourceText source, Findings findings) {

@@ -36,12 +36,18 @@ final class SlipExplainer {
   private static final int FEW = 3;
 
   private final Places places;
+  private final LimitSlips limits;
 
   SlipExplainer(Places places) {
     this.places = places;
+    this.limits = new LimitSlips(places);
   }
 
   Finding explain(Slip slip) {
+    return limits.find(slip).orElseGet(() -> explainByRule(slip));
+  }
+
+  private Finding explainByRule(Slip slip) {
     if (slip.index() == 1 && begins(slip, "network")) {
       return title(slip);
     }

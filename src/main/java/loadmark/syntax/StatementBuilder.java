@@ -70,7 +70,7 @@ final class StatementBuilder extends NetworkBaseVisitor<Statement> {
   public Statement visitLet(LetContext c) {
     Token token = c.valueName().getStart();
     Name name = names.read(token);
-    if (Words.isWord(token) || Words.LATER_STATEMENTS.contains(name.text())) {
+    if (Words.isWord(token) || Words.isLater(name.text())) {
       findings.error(
           "reserved-word",
           name.span(),
@@ -142,6 +142,13 @@ final class StatementBuilder extends NetworkBaseVisitor<Statement> {
     if (closure instanceof DrivenContext c) {
       DriveKind kind =
           has(c, "peak") ? DriveKind.PEAK : has(c, "dc") ? DriveKind.DC : DriveKind.RMS;
+      if (kind == DriveKind.DC && has(c, "mains")) {
+        findings.error(
+            "dc-mains",
+            places.of(c.getStop()),
+            "the mains is no direct voltage",
+            "take out `dc` or `mains`");
+      }
       return Optional.of(
           new Closure.Driven(
               expressions.build(c.volts), kind, expressions.buildIfAny(c.behind), has(c, "mains")));

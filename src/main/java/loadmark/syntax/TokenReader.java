@@ -4,7 +4,6 @@ import java.text.Normalizer;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.regex.Pattern;
-import loadmark.diagnostic.Findings;
 import loadmark.diagnostic.SourceText;
 import loadmark.syntax.antlr.NetworkLexer;
 import loadmark.syntax.antlr.NetworkParser;
@@ -13,26 +12,22 @@ import org.antlr.v4.runtime.CommonToken;
 import org.antlr.v4.runtime.Token;
 
 /**
- * Text to tokens, each with its line and column in code points. Two things the lexer does not see
- * are settled here: a comma in place of a decimal point, and units per metre behind a number.
+ * Text to tokens, each with its line and column in code points. Units per metre behind a number,
+ * which the lexer does not see, are settled here.
  */
 final class TokenReader {
   private static final Pattern UNIT_PER_METRE = Pattern.compile("[fpnuµμmkMGT]?(Ω|ohm|H|S|F|s)");
   private static final int REPLACEMENT = 0xFFFD;
 
   private final SourceText source;
-  private final Places places;
-  private final Findings findings;
   private final List<Token> tokens = new ArrayList<>();
 
-  private TokenReader(SourceText source, Findings findings) {
+  private TokenReader(SourceText source) {
     this.source = source;
-    this.places = new Places(source);
-    this.findings = findings;
   }
 
-  static List<Token> read(SourceText source, Findings findings) {
-    return new TokenReader(source, findings).read();
+  static List<Token> read(SourceText source) {
+    return new TokenReader(source).read();
   }
 
   private List<Token> read() {
@@ -42,19 +37,33 @@ final class TokenReader {
     int line = 1;
     int lineStart = 0;
     int at = 0;
+    int onLine = 0;
     for (Token next = lexer.nextToken(); next.getType() != Token.EOF; next = lexer.nextToken()) {
       CommonToken token = (CommonToken) next;
       for (; at < token.getStartIndex(); at++) {
         if (endsLine(codePoints, at)) {
           line++;
           lineStart = at + 1;
+          onLine = 0;
         }
       }
       token.setLine(line);
       token.setCharPositionInLine(token.getStartIndex() - lineStart);
       add(token);
+      if (++onLine > LineCheck.MOST_TOKENS) {
+        skipLine(lexer, codePoints);
+      }
     }
     return tokens;
+  }
+
+  /** What stands behind so many tokens is refused whatever it is. */
+  private static void skipLine(NetworkLexer lexer, int[] text) {
+    int end = lexer.getInputStream().index();
+    while (end < text.length && !endsLine(text, end)) {
+      end++;
+    }
+    lexer.getInputStream().seek(end);
   }
 
   private static boolean endsLine(int[] text, int at) {
@@ -68,19 +77,6 @@ final class TokenReader {
   }
 
   private void add(CommonToken token) {
-    if (token.getType() == NetworkLexer.COMMA_NUMBER) {
-      String text = token.getText();
-      int comma = text.indexOf(',');
-      String read =
-          text.substring(0, comma) + "." + text.substring(comma + 1).replaceAll("[.,].*", "");
-      findings.error(
-          "decimal-comma",
-          places.of(token),
-          "a comma in a number",
-          "the decimal sign is a point: write " + Quoted.cut(read));
-      token.setType(NetworkLexer.NUMBER);
-      token.setText(text.substring(0, comma).contains(".") ? text.substring(0, comma) : read);
-    }
     tokens.add(token);
     joinPerMetre();
   }
@@ -96,7 +92,7 @@ final class TokenReader {
     Token slash = tokens.get(n - 2);
     Token metre = tokens.get(n - 1);
     boolean joined =
-        number.getType() == NetworkLexer.NUMBER
+        (number.getType() == NetworkLexer.NUMBER || number.getType() == NetworkLexer.COMMA_NUMBER)
             && slash.getType() == NetworkLexer.DIVIDED
             && Places.adjoin(unit, slash)
             && Places.adjoin(slash, metre)

@@ -35,6 +35,39 @@ final class Words {
           "sampler",
           "derate");
 
+  /** Words inside those statements; as names of values they would be ambiguous then. */
+  private static final Set<String> LATER_WORDS =
+      Set.of(
+          "with",
+          "turns",
+          "gain",
+          "bandwidth",
+          "input",
+          "output",
+          "length",
+          "conductance",
+          "delay",
+          "copper",
+          "distributed",
+          "sections",
+          "tangent",
+          "quality",
+          "velocity",
+          "permittivity",
+          "steps",
+          "trials",
+          "normal",
+          "sigma",
+          "every",
+          "acquire",
+          "bits",
+          "pin",
+          "through",
+          "shift",
+          "resonance",
+          "level",
+          "settling");
+
   /** Limits that a later version reads. */
   static final Set<String> LATER_LIMITS = Set.of("resonance", "level", "settling");
 
@@ -53,6 +86,11 @@ final class Words {
     Set<String> words = new TreeSet<>();
     first.toList().forEach(type -> words.add(text(type)));
     return words;
+  }
+
+  /** Whether a later version has this word. */
+  static boolean isLater(String word) {
+    return LATER_STATEMENTS.contains(word) || LATER_WORDS.contains(word);
   }
 
   /** Whether a token is a word of the language, and so no name of a value. */

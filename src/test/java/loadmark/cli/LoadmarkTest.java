@@ -125,6 +125,10 @@ class LoadmarkTest {
         "chekc a.zin | 1:10 | there is no command `chekc` | did you mean `check`?",
         "check --fromat json a.zin | 1:16 | check has no option --fromat | did you mean `--format`?",
         "check --format jsno a.zin | 1:16 | there is no format `jsno` | did you mean `json`?",
+        "check --out a.txt a.zin | 1:16 | check has no option --out | did you mean `--output`?",
+        "check --set=r=2\uFFFD\uFFFD a.zin | 1:16"
+            + " | characters of this argument are lost: the locale is not UTF-8"
+            + " | set LC_ALL=C.UTF-8, or write `ohm` for Ω and `u` for µ",
         "check --at 3 a.zin | 1:16 | check has no option --at | --at belongs to curve",
         "check | 1:10 | check needs a FILE | a network file, or - for standard input",
         "check a.zin --port | 1:22 | --port needs a value | ",
@@ -232,23 +236,61 @@ class LoadmarkTest {
   }
 
   @Test
-  void closedPipeEndsQuietly() {
+  void readerThatGoesAwayChangesNoStatus() {
+    assertThat(runInto("Broken pipe", KEPT, "check", "-")).isEqualTo(new Run(0, "", ""));
+    assertThat(runInto("Broken pipe", BROKEN, "check", "-")).isEqualTo(new Run(1, "", ""));
+    assertThat(runInto("Broken pipe", BROKEN, "curve", "-")).isEqualTo(new Run(0, "", ""));
+  }
+
+  @Test
+  void fullDiskIsToldWithStatusTwo() {
+    Run full = new Run(2, "", "loadmark: standard output could not be written\n");
+    assertThat(runInto("No space left on device", KEPT, "check", "-")).isEqualTo(full);
+    assertThat(runInto("No space left on device", KEPT, "curve", "-")).isEqualTo(full);
+  }
+
+  /** Standard output takes nothing and says why. */
+  private static Run runInto(String failure, String input, String... arguments) {
     ByteArrayOutputStream err = new ByteArrayOutputStream();
-    OutputStream closed =
+    OutputStream failing =
         new OutputStream() {
           @Override
           public void write(int b) throws IOException {
-            throw new IOException("Broken pipe");
+            throw new IOException(failure);
           }
         };
     int status =
         Loadmark.run(
-            new String[] {"check", "-"},
-            new ByteArrayInputStream(KEPT.getBytes(StandardCharsets.UTF_8)),
-            closed,
+            arguments,
+            new ByteArrayInputStream(input.getBytes(StandardCharsets.UTF_8)),
+            failing,
             err);
-    assertThat(err.size()).isZero();
-    assertThat(status).isEqualTo(2);
+    return new Run(status, "", err.toString(StandardCharsets.UTF_8));
+  }
+
+  @Test
+  void emptyNamesAreSlipsOnTheCommandLine() {
+    assertThat(run("check", "").err())
+        .startsWith("command line:1:16: error: the name of a FILE is empty\n");
+    assertThat(run("check", "--output", "", "a.zin").err())
+        .startsWith("command line:1:16: error: --output needs a name\n");
+  }
+
+  @Test
+  void frequencyGivenTwiceIsShownOnce() {
+    Run run = runWith(KEPT, "curve", "--format", "csv", "--at", "1 Hz, 1 Hz", "-");
+    assertThat(run).isEqualTo(runWith(KEPT, "curve", "--format", "csv", "--at", "1 Hz", "-"));
+    assertThat(run.status()).isZero();
+  }
+
+  @Test
+  void reportInTheReadmeIsWhatTheToolPrints() throws IOException {
+    String readme = Files.readString(Path.of("README.md"));
+    String command = "(`loadmark check --case all examples/thermistor-tap.zin`):\n\n```\n";
+    int from = readme.indexOf(command) + command.length();
+    assertThat(from).isGreaterThan(command.length());
+    assertThat(run("check", "--case", "all", "examples/thermistor-tap.zin").out())
+        .isEqualTo(readme.substring(from, readme.indexOf("```", from)));
   }
 
   @Test

@@ -19,6 +19,7 @@ import loadmark.network.Port;
 import loadmark.network.Value;
 import loadmark.response.Change;
 import loadmark.response.Comparison;
+import loadmark.response.Crossings;
 import loadmark.response.Loading;
 import loadmark.response.Ohms;
 import loadmark.response.PortResponse;
@@ -141,7 +142,10 @@ final class Formula {
   }
 
   static LimitJudgement judge(Comparison comparison, Limit limit) {
-    return new LimitJudge(comparison, List.of(limit)).judge(l -> Optional.empty()).get(0);
+    Crossings none = Crossings.none("formula");
+    return new LimitJudge(comparison, none, List.of(limit))
+        .judge(l -> Optional.empty(), l -> true)
+        .get(0);
   }
 
   static NetworkJudgement judge(List<Case> cases, List<Limit> limits, PortResponse response) {

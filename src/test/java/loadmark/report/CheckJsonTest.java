@@ -67,6 +67,7 @@ class CheckJsonTest {
             "verdict",
             "bare_verdict",
             "method",
+            "method_reason",
             "worst",
             "bands");
     assertThat(all.path("limits").path(0).path("bare_verdict").isNull()).isTrue();

@@ -39,7 +39,8 @@ class CheckTextTest {
             BROKEN   pack-tap.zin
                      Pack-voltage tap into a monitor converter
                      5 judgements: 2 broken, 3 kept, over 10 Hz to 1 MHz
-                     sampled: a breach narrower than the grid of frequencies could be missed
+                     sampled: a breach narrower than the grid of frequencies could be missed, because no algebra
+                     of it
 
                      case       line  limit      worst      at         allowed
             kept     converter    14  change     1.205 %    31.62 kHz  ≤ 2 %
@@ -147,6 +148,7 @@ class CheckTextTest {
             Verdict.UNDETERMINED,
             Optional.empty(),
             Method.SAMPLED,
+            "no algebra of it",
             Optional.empty(),
             List.of(),
             "the port is shorted at DC with and without the load");

@@ -96,6 +96,7 @@ final class Samples {
         Verdict.KEPT,
         bare(limit, Verdict.KEPT),
         Method.SAMPLED,
+        "no algebra of it",
         Optional.of(worst),
         List.of(),
         "");
@@ -107,6 +108,7 @@ final class Samples {
         Verdict.BROKEN,
         bare(limit, Verdict.BROKEN),
         Method.SAMPLED,
+        "no algebra of it",
         Optional.of(worst),
         List.of(bands),
         "");

@@ -14,30 +14,30 @@ import loadmark.network.Port;
 import loadmark.network.Supply;
 
 /** Builds networks for tests. Nodes go by their index; 0 is ground. */
-final class Circuit {
+public final class Circuit {
   private final List<Node> nodes = new ArrayList<>();
   private final List<Part> parts = new ArrayList<>();
   private final List<Supply> supplies = new ArrayList<>();
   private final List<Port> ports = new ArrayList<>();
   private final List<Load> loads = new ArrayList<>();
 
-  static OnePort r(double ohm) {
+  public static OnePort r(double ohm) {
     return OnePort.of(ElementKind.RESISTANCE, ohm);
   }
 
-  static OnePort c(double farad) {
+  public static OnePort c(double farad) {
     return OnePort.of(ElementKind.CAPACITANCE, farad);
   }
 
-  static OnePort l(double henry) {
+  public static OnePort l(double henry) {
     return OnePort.of(ElementKind.INDUCTANCE, henry);
   }
 
-  static OnePort series(OnePort... members) {
+  public static OnePort series(OnePort... members) {
     return OnePort.series(List.of(members));
   }
 
-  static OnePort parallel(OnePort... members) {
+  public static OnePort parallel(OnePort... members) {
     return OnePort.parallel(List.of(members));
   }
 
@@ -48,18 +48,18 @@ final class Circuit {
     return nodes.get(index);
   }
 
-  Circuit part(int a, int b, OnePort value) {
+  public Circuit part(int a, int b, OnePort value) {
     String name = "p" + parts.size();
     OptionalDouble rated = OptionalDouble.empty();
     parts.add(new Part(name, "impedance", node(a), node(b), value, "", rated, 1));
     return this;
   }
 
-  Circuit shunt(int a, int b, OnePort value) {
+  public Circuit shunt(int a, int b, OnePort value) {
     return load(Load.Placement.SHUNT, a, b, value);
   }
 
-  Circuit series(int a, int b, OnePort value) {
+  public Circuit series(int a, int b, OnePort value) {
     return load(Load.Placement.SERIES, a, b, value);
   }
 
@@ -68,21 +68,21 @@ final class Circuit {
     return this;
   }
 
-  Circuit port(int a, int b) {
+  public Circuit port(int a, int b) {
     return port(a, b, new Port.Closure.Open());
   }
 
-  Circuit port(int a, int b, Port.Closure closure) {
+  public Circuit port(int a, int b, Port.Closure closure) {
     ports.add(new Port("port" + ports.size(), node(a), node(b), closure, 1));
     return this;
   }
 
-  Circuit supply(int node, Optional<OnePort> behind) {
+  public Circuit supply(int node, Optional<OnePort> behind) {
     supplies.add(new Supply(node(node), 5, behind, 1));
     return this;
   }
 
-  List<Load> loads(int... which) {
+  public List<Load> loads(int... which) {
     List<Load> chosen = new ArrayList<>();
     for (int i : which) {
       chosen.add(loads.get(i));
@@ -90,17 +90,17 @@ final class Circuit {
     return chosen;
   }
 
-  Network network() {
+  public Network network() {
     return new Network(
         "", nodes, parts, supplies, ports, loads, List.of(), List.of(), Optional.empty());
   }
 
   /** All loads on, against none. */
-  Comparison compare() {
+  public Comparison compare() {
     return compare(loads, List.of());
   }
 
-  Comparison compare(List<Load> with, List<Load> without) {
+  public Comparison compare(List<Load> with, List<Load> without) {
     return Responses.of(network(), ports.get(0)).compare(with, without);
   }
 }

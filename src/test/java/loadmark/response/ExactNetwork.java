@@ -2,6 +2,9 @@ package loadmark.response;
 
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collections;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -30,7 +33,9 @@ final class ExactNetwork {
   private static final Apcomplex ONE = new Apcomplex(new Apfloat(1, DIGITS));
 
   /** An element's share in a branch: its own |x·∂y/∂x| and the branch's nodes. */
-  private record Share(int a, int b, Apcomplex slope) {}
+  private record Share(OnePort element, int a, int b, Apcomplex slope) {}
+
+  private record Slope(OnePort element, Apcomplex slope) {}
 
   private final Network network;
   private final Apcomplex s;
@@ -65,7 +70,7 @@ final class ExactNetwork {
         });
     matrix = new Apcomplex[merged.length][merged.length];
     for (Apcomplex[] row : matrix) {
-      java.util.Arrays.fill(row, ZERO);
+      Arrays.fill(row, ZERO);
     }
     for (Part part : network.parts()) {
       add(part.first(), part.second(), part.value());
@@ -102,11 +107,11 @@ final class ExactNetwork {
     if (a == b) {
       return;
     }
-    List<Apcomplex> slopes = new ArrayList<>();
+    List<Slope> slopes = new ArrayList<>();
     Apcomplex y = ONE.divide(impedance(value, ONE, slopes));
     Apcomplex square = y.multiply(y).negate();
-    for (Apcomplex slope : slopes) {
-      shares.add(new Share(a, b, square.multiply(slope)));
+    for (Slope slope : slopes) {
+      shares.add(new Share(slope.element, a, b, square.multiply(slope.slope)));
     }
     matrix[a][a] = matrix[a][a].add(y);
     matrix[b][b] = matrix[b][b].add(y);
@@ -115,7 +120,7 @@ final class ExactNetwork {
   }
 
   /** z; and x·∂z/∂x of each element, times {@code by}. */
-  private Apcomplex impedance(OnePort value, Apcomplex by, List<Apcomplex> slopes) {
+  private Apcomplex impedance(OnePort value, Apcomplex by, List<Slope> slopes) {
     if (value instanceof OnePort.Element element) {
       Apfloat x = exact(element.value().nominal());
       Apcomplex z =
@@ -128,7 +133,7 @@ final class ExactNetwork {
       boolean falls =
           element.kind() == OnePort.ElementKind.CONDUCTANCE
               || element.kind() == OnePort.ElementKind.CAPACITANCE;
-      slopes.add(by.multiply(falls ? z.negate() : z));
+      slopes.add(new Slope(element, by.multiply(falls ? z.negate() : z)));
       return z;
     }
     if (value instanceof OnePort.Series series) {
@@ -158,7 +163,7 @@ final class ExactNetwork {
     int minus = merged[network.ports().get(0).minus().index()];
     int size = merged.length;
     Apcomplex[] known = new Apcomplex[size];
-    java.util.Arrays.fill(known, ZERO);
+    Arrays.fill(known, ZERO);
     known[plus] = ONE;
     boolean[] out = new boolean[size];
     for (int i = 0; i < size; i++) {
@@ -180,7 +185,7 @@ final class ExactNetwork {
           best = i;
         }
       }
-      java.util.Collections.swap(rows, k, best);
+      Collections.swap(rows, k, best);
       int top = rows.get(k);
       for (int i = k + 1; i < rows.size(); i++) {
         int row = rows.get(i);
@@ -198,7 +203,7 @@ final class ExactNetwork {
       }
     }
     volts = new Apcomplex[size];
-    java.util.Arrays.fill(volts, ZERO);
+    Arrays.fill(volts, ZERO);
     for (int k = columns.size() - 1; k >= 0; k--) {
       int top = rows.get(k);
       Apcomplex sum = known[top];
@@ -226,6 +231,36 @@ final class ExactNetwork {
     }
     // s·∂Z/∂s is the sum of the same terms over inductors less that over capacitors: no more.
     return 2 * sum;
+  }
+
+  /**
+   * Σ |x·∂H/∂x| / |H| of H = Z′/Z − 1 over all elements' values, this being the network of Z; after
+   * {@link #solve} of both.
+   */
+  double conditionOfChange(ExactNetwork loaded, Apcomplex z, Apcomplex loadedZ) {
+    Apcomplex ratio = loadedZ.divide(z);
+    IdentityHashMap<OnePort, Apcomplex> slopes = new IdentityHashMap<>();
+    gather(slopes, z, ratio);
+    loaded.gather(slopes, loadedZ, ratio.negate());
+    double sum = 0;
+    for (Apcomplex slope : slopes.values()) {
+      sum += abs(slope.divide(ratio.subtract(ONE)));
+    }
+    return 2 * sum;
+  }
+
+  private void gather(IdentityHashMap<OnePort, Apcomplex> slopes, Apcomplex z, Apcomplex by) {
+    for (Share share : shares) {
+      Apcomplex across = volts[share.a].subtract(volts[share.b]);
+      Apcomplex slope = share.slope.multiply(across).multiply(across).divide(z).multiply(by);
+      slopes.merge(share.element, slope, Apcomplex::add);
+    }
+  }
+
+  /** |found − exact|/|exact|; absolute where that is 0. */
+  static double error(Apcomplex exact, double re, double im) {
+    Apcomplex error = new Apcomplex(exact(re), exact(im)).subtract(exact);
+    return exact.equals(ZERO) ? abs(error) : abs(error.divide(exact));
   }
 
   static double abs(Apcomplex z) {

@@ -56,7 +56,12 @@ final class PortCurves {
 
   /** The criterion less the level; at a lossless pole what it is beside it. */
   double excess(Level level, double hz) {
-    double value = value(level.criterion(), level.inOhm(), at(hz), hz);
+    return excess(level, at(hz), hz);
+  }
+
+  /** The same at a point that is known already. */
+  double excess(Level level, Point point, double hz) {
+    double value = value(level.criterion(), level.inOhm(), point, hz);
     return Double.isNaN(value) ? excess(level, Math.nextUp(hz)) : value - level.value();
   }
 

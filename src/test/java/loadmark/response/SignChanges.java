@@ -19,7 +19,7 @@ record SignChanges(List<Double> edges, List<Boolean> positive, boolean complete)
   private static final double[] BETWEEN = {0.02, 0.25, 0.5, 0.75, 0.98};
 
   /** Candidates closer than this, relative, may stand for crossings that lie beside them. */
-  private static final double CLOSE = 1e-6;
+  private static final double CLOSE = 1e-4;
 
   SignChanges {
     edges = List.copyOf(edges);
