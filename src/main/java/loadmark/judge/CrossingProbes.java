@@ -13,8 +13,8 @@ final class CrossingProbes implements Probes {
   /** Into how many parts a band is cut: first, and where signs and crossings disagreed. */
   private static final int[] PARTS = {1, 8};
 
-  /** A crossing may be off by this, relative: one of a close pair is. */
-  private static final double CANDIDATE_ERROR = 1e-6;
+  /** A crossing may be off by this, relative: where changes of 1e-12 are told apart it is. */
+  private static final double CANDIDATE_ERROR = 1e-3;
 
   /** An excess nearer to 0 has no sign that counts. */
   private static final double INDECISIVE = 1e-9;

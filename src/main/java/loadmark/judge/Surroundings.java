@@ -5,8 +5,8 @@ import loadmark.network.Band;
 
 /** Where to look to tell what happens at candidates and between them. */
 final class Surroundings {
-  /** Relative distances from a candidate, from what a single one to what one of a pair is off. */
-  private static final double[] AWAY = {1e-11, 1e-10, 1e-9, 1e-8, 1e-7, 1e-6, 1e-5, 1e-4};
+  /** Relative distances from a candidate: from what the best ones to what the worst are off. */
+  private static final double[] AWAY = {1e-11, 1e-10, 1e-9, 1e-8, 1e-7, 1e-6, 1e-5, 1e-4, 1e-3};
 
   /** Between neighbours, as parts of the logarithm of their ratio. */
   private static final double[] BETWEEN = {0.03, 0.25, 0.5, 0.75, 0.97};

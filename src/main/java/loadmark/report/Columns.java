@@ -9,7 +9,7 @@ final class Columns {
   private static final int GAP = 2;
 
   /** A column is not cut below this. */
-  private static final int LEAST = 8;
+  private static final int LEAST = 4;
 
   private final List<String[]> rows = new ArrayList<>();
   private final String alignment;
@@ -41,7 +41,9 @@ final class Columns {
       }
     }
     shrink(widths, room);
-    return rows.stream().map(row -> line(row, widths)).toList();
+    int roomy = Arrays.stream(widths).sum() + GAP * (widths.length - 1);
+    int gap = roomy <= room ? GAP : 1;
+    return rows.stream().map(row -> line(row, widths, gap)).toList();
   }
 
   private void shrink(int[] widths, int room) {
@@ -60,11 +62,11 @@ final class Columns {
     }
   }
 
-  private String line(String[] row, int[] widths) {
+  private String line(String[] row, int[] widths, int gap) {
     StringBuilder line = new StringBuilder();
     for (int i = 0; i < widths.length; i++) {
       String cell = Visible.cut(row[i], widths[i]);
-      line.append(i == 0 ? "" : " ".repeat(GAP));
+      line.append(i == 0 ? "" : " ".repeat(gap));
       line.append(
           alignment.charAt(i) == 'r'
               ? Visible.padLeft(cell, widths[i])

@@ -7,10 +7,13 @@ import java.util.Optional;
 import java.util.SortedSet;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import loadmark.judge.Blame;
 import loadmark.judge.CaseJudgement;
 import loadmark.judge.LimitJudgement;
 import loadmark.judge.LimitJudgement.Method;
 import loadmark.judge.NetworkJudgement;
+import loadmark.judge.Verdict;
 import loadmark.judge.Worst;
 import loadmark.network.Limit;
 import loadmark.network.Load;
@@ -35,8 +38,16 @@ final class FileText {
 
   private boolean hasUndetermined() {
     return judgement.cases().stream()
-        .flatMap(c -> c.limits().stream())
-        .anyMatch(l -> Outcome.of(l.verdict()) == Outcome.UNDETERMINED);
+        .flatMap(
+            c ->
+                Stream.concat(
+                    c.limits().stream().flatMap(l -> verdicts(l)),
+                    c.blame().stream().map(Blame::verdict)))
+        .anyMatch(v -> v == Verdict.UNDETERMINED);
+  }
+
+  private static Stream<Verdict> verdicts(LimitJudgement limit) {
+    return Stream.concat(Stream.of(limit.verdict()), limit.bareVerdict().stream());
   }
 
   String write() {

@@ -17,6 +17,9 @@ final class Regime {
   private final Topology with;
   private final double[] values;
 
+  /** Whether anything differs between the two; if not, the change is 0 and known exactly. */
+  private final boolean changed;
+
   /** Of both where the port's nodes are connected in both, else of the one where they are. */
   private final @Nullable CaseSolver solver;
 
@@ -25,8 +28,9 @@ final class Regime {
     without = network.without();
     with = network.with();
     values = equations.nominalValues();
+    changed = network.isChanged();
     if (without == Topology.CONNECTED && with == Topology.CONNECTED) {
-      solver = new CaseSolver(network.isChanged() ? network : equations.compare(loads, loads));
+      solver = new CaseSolver(changed ? network : equations.compare(loads, loads));
     } else if (without == Topology.CONNECTED) {
       solver = new CaseSolver(equations.compare(against, against));
     } else if (with == Topology.CONNECTED) {
@@ -59,7 +63,7 @@ final class Regime {
         change,
         error(without, solutions == null ? null : solutions.without(), i),
         error(with, solutions == null ? null : solutions.with(), i),
-        solutions != null && both ? solutions.change().error(i) : 0);
+        solutions != null && both && changed ? solutions.change().error(i) : 0);
   }
 
   private static Ohms ohms(Topology topology, Solutions.@Nullable Quantity solved, int i) {
