@@ -32,7 +32,9 @@ public final class CurveTouchstone {
       findings.error(
           "s1p-one-curve",
           source.whole(),
-          "format s1p holds one port in one case, and here are " + table.curves().size(),
+          "format s1p holds one port in one case, and this file has "
+              + table.curves().size()
+              + " of them",
           "choose with"
               + option("--port", table, c -> c.port().name())
               + option("--case", table, c -> c.shown().name()));

@@ -13,12 +13,14 @@ import loadmark.diagnostic.Span;
 final class Header {
   private static final String COUNT = "[1-9][0-9]{0,8}";
 
+  private static final int MOST_PORTS = 2;
+
   private final Lines lines;
   private final Findings findings;
   private final Map<Keyword, Span> places = new EnumMap<>(Keyword.class);
   private final List<Double> references = new ArrayList<>();
-  private Options options = Options.DEFAULT;
   private int ports;
+  private int referenceWords;
   private int frequencies;
   private Order full = Order.COLUMNS;
   private boolean triangle;
@@ -28,19 +30,10 @@ final class Header {
     this.findings = findings;
   }
 
-  /** Takes in the option line that is current. */
-  void readOptions() {
-    if (options.stated()) {
-      OptionLine.reportLate(lines, options, findings);
-    } else {
-      options = OptionLine.read(lines, findings);
-    }
-  }
-
   /** Takes in a keyword and its values on the current line. */
   void readKeyword(Keyword keyword) {
     if (places.putIfAbsent(keyword, lines.place(0)) != null) {
-      findings.error("data-keyword", lines.place(0), keyword.word() + " is given twice");
+      findings.error("data-keyword", lines.place(0), keyword.quoted() + " is given twice");
       return;
     }
     switch (keyword) {
@@ -63,7 +56,7 @@ final class Header {
               "mixed-mode data is not read",
               "write the data out again as single-ended");
       default ->
-          findings.error("data-keyword", lines.place(0), keyword.word() + " has no place here");
+          findings.error("data-keyword", lines.place(0), keyword.quoted() + " has no place here");
     }
   }
 
@@ -71,8 +64,8 @@ final class Header {
     readValue(Keyword.PORTS, COUNT, "1 or 2")
         .ifPresent(
             n -> {
-              ports = Math.min(Integer.parseInt(n), 3);
-              if (ports > 2) {
+              ports = Integer.parseInt(n);
+              if (ports > MOST_PORTS) {
                 findings.error(
                     "data-ports",
                     lines.place(1),
@@ -88,14 +81,16 @@ final class Header {
     findings.error(
         "data-keyword-value",
         lines.count() > 1 ? lines.place(1) : lines.place(0),
-        "behind " + keyword.word() + " stands " + expected + ", and nothing else");
+        keyword.quoted() + " wants " + expected + ", and nothing else");
     return Optional.empty();
   }
 
   /** Reference resistances may go on over further lines. */
   void readReferences(int from) {
     for (int i = from; i < lines.count(); i++) {
-      References.read(lines, i, findings).ifPresent(references::add);
+      if (++referenceWords <= MOST_PORTS) {
+        References.read(lines, i, findings).ifPresent(references::add);
+      }
     }
   }
 
@@ -104,7 +99,7 @@ final class Header {
     return places.getOrDefault(Keyword.FREQUENCIES, lines.whole());
   }
 
-  /** How many frequencies the file says it has. */
+  /** How many frequencies the file says it has; 0 where that is not known. */
   int frequencies() {
     return frequencies;
   }
@@ -114,7 +109,7 @@ final class Header {
    *
    * @return empty, with findings, where the data could not be understood
    */
-  Optional<Layout> toLayout() {
+  Optional<Layout> toLayout(Options options) {
     int before = findings.errorCount();
     require(Keyword.PORTS);
     require(Keyword.FREQUENCIES);
@@ -122,14 +117,11 @@ final class Header {
       require(Keyword.ORDER);
     }
     boolean known = ports == 1 || ports == 2;
-    if (known && places.containsKey(Keyword.REFERENCE) && references.size() != ports) {
+    if (known && places.containsKey(Keyword.REFERENCE) && referenceWords != ports) {
       findings.error(
           "data-reference",
           places.getOrDefault(Keyword.REFERENCE, lines.whole()),
-          "there are " + references.size() + " reference resistances for " + ports + " ports");
-    }
-    if (!options.stated()) {
-      OptionLine.warnOfNone(lines, findings);
+          "reference resistances: " + referenceWords + ", ports: " + ports);
     }
     if (!known || findings.errorCount() > before) {
       return Optional.empty();
@@ -140,15 +132,15 @@ final class Header {
             options,
             false,
             order,
-            references.isEmpty()
-                ? Collections.nCopies(ports, options.referenceOhm())
-                : references));
+            references.size() == ports
+                ? references
+                : Collections.nCopies(ports, options.referenceOhm())));
   }
 
   private void require(Keyword keyword) {
     if (!places.containsKey(keyword)) {
       findings.error(
-          "data-keyword-missing", lines.place(0), keyword.word() + " is missing above the data");
+          "data-keyword-missing", lines.place(0), keyword.quoted() + " is missing above the data");
     }
   }
 }

@@ -47,4 +47,9 @@ enum Keyword {
   String word() {
     return word;
   }
+
+  /** As messages quote it. */
+  String quoted() {
+    return "`" + word + "`";
+  }
 }

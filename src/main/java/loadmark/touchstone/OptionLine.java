@@ -30,28 +30,9 @@ final class OptionLine {
     return new OptionLine(lines, findings).read();
   }
 
-  /** The current line is an option line that comes behind another, or behind data. */
-  static void reportLate(Lines lines, Options earlier, Findings findings) {
-    if (earlier.stated()) {
-      findings.warning(
-          "data-second-options", lines.place(0), "only the first option line of a file counts");
-    } else {
-      findings.error(
-          "data-late-options", lines.place(0), "an option line stands before the data it is about");
-    }
-  }
-
-  /** For data without an option line: the current line begins it. */
-  static void warnOfNone(Lines lines, Findings findings) {
-    findings.warning(
-        "data-no-options",
-        lines.place(0),
-        "there is no option line above the data: it is read as `# GHz S MA R 50`",
-        "say so in the file, or say what it is");
-  }
-
   private Options read() {
-    for (int i = 0; i < lines.count(); i++) {
+    int most = findings.errorCount() + Touchstone.MOST_ERRORS;
+    for (int i = 0; i < lines.count() && findings.errorCount() < most; i++) {
       // The sign may stand straight before the first word.
       String word = i == 0 ? lines.word(0).substring(1) : lines.word(i);
       if (word.equalsIgnoreCase(REFERENCE)) {
@@ -61,7 +42,7 @@ final class OptionLine {
         readWord(word.toUpperCase(Locale.ROOT), i);
       }
     }
-    return new Options(unit, parameter, notation, referenceOhm, true);
+    return new Options(unit, parameter, notation, referenceOhm);
   }
 
   private void readWord(String word, int i) {

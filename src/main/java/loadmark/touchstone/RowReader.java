@@ -10,15 +10,13 @@ import loadmark.diagnostic.Span;
  * line with an odd number of words begins one, and a line with an even number carries it on.
  */
 final class RowReader {
-  /** A file with more errors is not read on. */
-  private static final int MOST_ERRORS = 25;
-
   /** Frequency, least noise figure, source reflection (two numbers), noise resistance. */
   private static final int NOISE_WIDTH = 5;
 
   private static final Set<String> NOT_FINITE = Set.of("nan", "inf", "infinity");
 
   private final Lines lines;
+  private final OptionLines optionLines;
   private final Layout layout;
   private final Findings findings;
   private final Points points;
@@ -28,22 +26,23 @@ final class RowReader {
   /** Those of the current line. */
   private final double[] numbers;
 
-  private final int mostErrors;
+  private final int errorsBefore;
   private int filled;
   private Span rowPlace;
   private int rows;
   private boolean skipping;
   private boolean stopped;
 
-  RowReader(Lines lines, Layout layout, Findings findings) {
+  RowReader(Lines lines, OptionLines optionLines, Layout layout, Findings findings) {
     this.lines = lines;
+    this.optionLines = optionLines;
     this.layout = layout;
     this.findings = findings;
     this.points = new Points(layout);
     this.order = new FrequencyOrder(findings);
     this.row = new double[layout.width()];
     this.numbers = new double[layout.width()];
-    this.mostErrors = findings.errorCount() + MOST_ERRORS;
+    this.errorsBefore = findings.errorCount();
     this.rowPlace = lines.whole();
   }
 
@@ -54,17 +53,21 @@ final class RowReader {
    */
   Points read() {
     boolean more = lines.count() > 0;
+    Span firstPlace = more ? lines.place(0) : lines.whole();
     while (more && !stopped && !lines.isKeyword()) {
       if (lines.isOptions()) {
-        OptionLine.reportLate(lines, layout.options(), findings);
+        stopped = !optionLines.readLate();
       } else {
         readLine();
       }
-      stopped |= findings.errorCount() >= mostErrors;
+      stopped |= findings.errorCount() >= errorsBefore + Touchstone.MOST_ERRORS;
       more = lines.next();
     }
     if (filled > 0 && !stopped) {
       reportLength(filled, rowPlace);
+    }
+    if (findings.errorCount() == errorsBefore) {
+      optionLines.warnOfNone(firstPlace);
     }
     return points;
   }
@@ -167,15 +170,15 @@ final class RowReader {
           "numbers have a decimal point, and blanks between them");
       // Whoever writes one comma writes them all.
       stopped = true;
-    } else {
+    } else if (points.size() == 0) {
       findings.error(
           "data-not-number",
           place,
           word + " is no number",
-          points.size() == 0
-              ? "is this a file in the Touchstone format?"
-              : "a comment begins with `!`");
-      stopped |= points.size() == 0;
+          "is this a file in the Touchstone format?");
+      stopped = true;
+    } else {
+      findings.error("data-not-number", place, word + " is no number");
     }
   }
 

@@ -16,6 +16,9 @@ public final class Touchstone {
   /** The largest file that is read, in bytes: some million rows. */
   public static final int MOST_BYTES = 256 << 20;
 
+  /** A file with so many errors is not read on. */
+  public static final int MOST_ERRORS = 25;
+
   private static final char BYTE_ORDER_MARK = '\uFEFF';
 
   private Touchstone() {}
@@ -78,8 +81,8 @@ public final class Touchstone {
    * Text to data. The end of the name (.s1p, .s2p) tells how many ports a file of version 1.1 has,
    * else its first row does.
    *
-   * @return empty, after at least one error, where the file cannot be read right; at most some 25
-   *     errors are collected
+   * @return empty, after at least one error, where the file cannot be read right; after {@link
+   *     #MOST_ERRORS} or a few more it is not read on
    */
   public static Optional<MeasuredData> read(SourceText source, Findings findings) {
     int before = findings.errorCount();

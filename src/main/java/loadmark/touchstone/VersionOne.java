@@ -28,7 +28,12 @@ final class VersionOne {
 
   /** Reads from the current line on; empty where there are no rows to be read. */
   Optional<Points> read() {
-    Options options = readOptions();
+    OptionLines optionLines = new OptionLines(lines, findings);
+    boolean more = true;
+    while (more && lines.isOptions()) {
+      optionLines.read();
+      more = lines.next();
+    }
     if (lines.count() == 0) {
       findings.error("data-empty", lines.end(), "the file has no data");
       return Optional.empty();
@@ -41,29 +46,13 @@ final class VersionOne {
     if (ports.isEmpty()) {
       return Optional.empty();
     }
-    if (!options.stated()) {
-      OptionLine.warnOfNone(lines, findings);
-    }
-    RowReader rows = new RowReader(lines, Layout.old(options, ports.getAsInt()), findings);
+    Layout layout = Layout.old(optionLines.options(), ports.getAsInt());
+    RowReader rows = new RowReader(lines, optionLines, layout, findings);
     Points points = rows.read();
     if (!rows.isStopped() && lines.count() > 0) {
       reportKeyword();
     }
     return Optional.of(points);
-  }
-
-  private Options readOptions() {
-    Options options = Options.DEFAULT;
-    boolean more = true;
-    while (more && lines.isOptions()) {
-      if (options.stated()) {
-        OptionLine.reportLate(lines, options, findings);
-      } else {
-        options = OptionLine.read(lines, findings);
-      }
-      more = lines.next();
-    }
-    return options;
   }
 
   private void reportKeyword() {
@@ -92,6 +81,10 @@ final class VersionOne {
   }
 
   private OptionalInt findPortsInRow() {
+    if (Double.isNaN(lines.number(0, 0))) {
+      // No row at all, however many ports: whoever reads it says so.
+      return OptionalInt.of(1);
+    }
     for (int ports = 1; ports <= 2; ports++) {
       if (lines.count() == Layout.old(Options.DEFAULT, ports).width()) {
         return OptionalInt.of(ports);

@@ -9,11 +9,13 @@ import loadmark.diagnostic.Span;
 final class VersionTwo {
   private final Lines lines;
   private final Findings findings;
+  private final OptionLines optionLines;
   private final Header header;
 
   VersionTwo(Lines lines, Findings findings) {
     this.lines = lines;
     this.findings = findings;
+    this.optionLines = new OptionLines(lines, findings);
     this.header = new Header(lines, findings);
   }
 
@@ -29,7 +31,7 @@ final class VersionTwo {
     if (findings.errorCount() > before || !readHeader()) {
       return Optional.empty();
     }
-    Optional<Layout> layout = header.toLayout();
+    Optional<Layout> layout = header.toLayout(optionLines.options());
     lines.next();
     return layout.map(this::readRows);
   }
@@ -37,9 +39,10 @@ final class VersionTwo {
   /** Whether the data was reached. */
   private boolean readHeader() {
     boolean inReference = false;
-    while (lines.next()) {
+    int most = findings.errorCount() + Touchstone.MOST_ERRORS;
+    while (findings.errorCount() < most && lines.next()) {
       if (lines.isOptions()) {
-        header.readOptions();
+        optionLines.read();
         inReference = false;
       } else if (lines.isKeyword()) {
         Optional<Keyword> keyword = findKeyword();
@@ -48,7 +51,9 @@ final class VersionTwo {
         }
         inReference = keyword.filter(k -> k == Keyword.REFERENCE).isPresent();
         if (keyword.filter(k -> k == Keyword.BEGIN_INFORMATION).isPresent()) {
-          skipInformation();
+          if (!skipInformation()) {
+            return false;
+          }
         } else if (keyword.isPresent()) {
           header.readKeyword(keyword.get());
         } else {
@@ -60,11 +65,13 @@ final class VersionTwo {
         findings.error(
             "data-keyword-missing",
             lines.place(0),
-            "data stands behind " + Keyword.NETWORK_DATA.word());
+            "data stands behind " + Keyword.NETWORK_DATA.quoted());
         return false;
       }
     }
-    findings.error("data-empty", lines.end(), "the file has no " + Keyword.NETWORK_DATA.word());
+    if (findings.errorCount() < most) {
+      findings.error("data-empty", lines.end(), "the file has no " + Keyword.NETWORK_DATA.quoted());
+    }
     return false;
   }
 
@@ -83,31 +90,35 @@ final class VersionTwo {
             .orElse("a keyword of version 2.0 is expected, such as " + Keyword.PORTS.word()));
   }
 
-  private void skipInformation() {
+  /** Whether it ends. */
+  private boolean skipInformation() {
     Span begin = lines.place(0);
     while (lines.next()) {
       if (lines.isKeyword()
           && findKeyword().filter(k -> k == Keyword.END_INFORMATION).isPresent()) {
-        return;
+        return true;
       }
     }
     findings.error(
-        "data-keyword", begin, Keyword.END_INFORMATION.word() + " is missing behind this");
+        "data-keyword", begin, Keyword.END_INFORMATION.quoted() + " is missing behind this");
+    return false;
   }
 
   private Points readRows(Layout layout) {
     int before = findings.errorCount();
-    RowReader reader = new RowReader(lines, layout, findings);
+    RowReader reader = new RowReader(lines, optionLines, layout, findings);
     Points points = reader.read();
     if (!reader.isStopped()) {
       readEnd();
-      if (findings.errorCount() == before && reader.rows() != header.frequencies()) {
+      boolean known = header.frequencies() > 0 && findings.errorCount() == before;
+      if (known && reader.rows() != header.frequencies()) {
         findings.error(
             "data-rows",
             header.countPlace(),
-            "the file says that it has "
+            Keyword.FREQUENCIES.quoted()
+                + " says "
                 + header.frequencies()
-                + " frequencies, and it has "
+                + "; rows in the file: "
                 + reader.rows());
       }
     }
@@ -130,6 +141,9 @@ final class VersionTwo {
       lines.next();
     }
     findings.warning(
-        "data-no-end", lines.end(), "the file ends without " + Keyword.END.word(), "is it whole?");
+        "data-no-end",
+        lines.end(),
+        "the file ends without " + Keyword.END.quoted(),
+        "is it whole?");
   }
 }
