@@ -1,10 +1,13 @@
 package loadmark.allowance;
 
+import static java.util.Comparator.comparingDouble;
+
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.SortedSet;
 import java.util.TreeSet;
+import java.util.stream.IntStream;
 import loadmark.judge.BrokenBand;
 import loadmark.network.Band;
 import loadmark.network.Limit;
@@ -21,15 +24,17 @@ import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
  */
 final class StopFinder {
   private static final double PER_DECADE = 200;
-  private static final int LEAST_INTERVALS = 100;
+  private static final int LEAST_STEPS = 100;
 
   /** Into so many parts a band is cut that turned out to be broken. */
   private static final int IN_BAND = 16;
 
-  /** Low points this much above the lowest may still lead lower. */
-  private static final double NEAR = 1.1;
+  /** How much farther than its neighbours rise a valley may fall: a parabola needs 1/8. */
+  private static final double REACH = 4;
 
-  private static final double PRECISION = 1e-12;
+  /** Relative, of the frequency: a valley's depth is right to its square, a kink's to it. */
+  private static final double PRECISION = 1e-10;
+
   private static final int MOST_EVALUATIONS = 200;
 
   /** Stands for the logarithm of an infinite t. */
@@ -45,7 +50,7 @@ final class StopFinder {
     this.place = place;
     this.limits = limits;
     TreeSet<Double> all = new TreeSet<>();
-    limits.forEach(l -> l.scope().forEach(band -> addPoints(band, all)));
+    limits.forEach(l -> l.scope().forEach(band -> addPoints(band, steps(band), all)));
     double[] hz = all.stream().mapToDouble(Double::doubleValue).toArray();
     List<LoadPlace.Point> points = place.at(hz);
     for (Limit limit : limits) {
@@ -53,23 +58,18 @@ final class StopFinder {
     }
   }
 
-  private static void addPoints(Band band, SortedSet<Double> all) {
+  /** Both ends, and what cuts the band into equal logarithmic steps. */
+  private static void addPoints(Band band, int steps, SortedSet<Double> all) {
     all.add(band.fromHz());
     all.add(band.toHz());
-    if (!band.isPoint()) {
-      double decades = Math.log10(band.toHz() / band.fromHz());
-      int n = (int) Math.max(LEAST_INTERVALS, Math.ceil(PER_DECADE * decades));
-      all.addAll(between(band, n));
+    for (int i = 1; i < steps && !band.isPoint(); i++) {
+      all.add(band.fromHz() * Math.pow(band.toHz() / band.fromHz(), (double) i / steps));
     }
   }
 
-  /** The ends of n equal logarithmic steps, but for the first and the last. */
-  private static List<Double> between(Band band, int n) {
-    List<Double> hz = new ArrayList<>();
-    for (int i = 1; i < n; i++) {
-      hz.add(band.fromHz() * Math.pow(band.toHz() / band.fromHz(), (double) i / n));
-    }
-    return hz;
+  private static int steps(Band band) {
+    double decades = band.isPoint() ? 0 : Math.log10(band.toHz() / band.fromHz());
+    return (int) Math.max(LEAST_STEPS, Math.ceil(PER_DECADE * decades));
   }
 
   private static List<LoadPlace.Point> inside(List<LoadPlace.Point> points, Band band) {
@@ -95,10 +95,9 @@ final class StopFinder {
   Stop find(Limit limit, Growth growth, List<BrokenBand> bands) {
     Stop first = Stop.NOWHERE;
     for (BrokenBand broken : bands) {
-      TreeSet<Double> hz = new TreeSet<>(between(broken.band(), IN_BAND));
-      hz.add(broken.band().fromHz());
+      TreeSet<Double> hz = new TreeSet<>();
+      addPoints(broken.band(), IN_BAND, hz);
       hz.add(broken.worst().hz());
-      hz.add(broken.band().toHz());
       List<LoadPlace.Point> points =
           place.at(hz.stream().mapToDouble(Double::doubleValue).toArray());
       first = first.sooner(least(limit, growth, points));
@@ -108,17 +107,24 @@ final class StopFinder {
 
   private Stop least(Limit limit, Growth growth, List<LoadPlace.Point> points) {
     double[] t = points.stream().mapToDouble(p -> first(limit, p, growth)).toArray();
-    double lowest = Double.POSITIVE_INFINITY;
-    for (double one : t) {
-      lowest = Math.min(lowest, one);
-    }
-    double least = lowest;
-    for (int i = 0; i < t.length && lowest > 0; i++) {
-      double before = i == 0 ? Double.POSITIVE_INFINITY : t[i - 1];
-      double after = i == t.length - 1 ? Double.POSITIVE_INFINITY : t[i + 1];
-      if (t[i] <= NEAR * lowest && t[i] <= before && t[i] <= after) {
+    int last = t.length - 1;
+    double least = Double.POSITIVE_INFINITY;
+    // The lowest first: most of the others then cannot lead lower any more.
+    for (int i :
+        IntStream.rangeClosed(0, last)
+            .boxed()
+            .sorted(comparingDouble((Integer i) -> t[i]))
+            .toList()) {
+      if (t[i] == 0 || t[i] == Double.POSITIVE_INFINITY) {
+        return Stop.at(Math.min(least, t[i]), limit);
+      }
+      double before = t[Math.max(i - 1, 0)];
+      double after = t[Math.min(i + 1, last)];
+      double rise = Math.max(before, after) - t[i];
+      least = Math.min(least, t[i]);
+      if (t[i] <= before && t[i] <= after && rise > 0 && t[i] - REACH * rise < least) {
         double low = hz(points.get(Math.max(i - 1, 0)));
-        double high = hz(points.get(Math.min(i + 1, t.length - 1)));
+        double high = hz(points.get(Math.min(i + 1, last)));
         least = Math.min(least, narrow(limit, growth, low, hz(points.get(i)), high));
       }
     }

@@ -56,7 +56,7 @@ public final class AllowText {
   private static void writeHeaviest(StringBuilder text, LoadAllowance one) {
     Load load = one.load();
     labelled(text, "as it is", CaseText.clean(load.text()));
-    labelled(text, "all limits", "fine " + Room.heaviest(load, one.heaviest()));
+    labelled(text, "all limits", Room.heaviest(load, one.heaviest()));
     Room.beside(load, one.heaviest()).forEach(beside -> labelled(text, "", beside));
   }
 
@@ -69,11 +69,12 @@ public final class AllowText {
 
   private static void writePoints(StringBuilder text, LoadAllowance one) {
     List<PointAllowance> points = one.points();
-    boolean free =
-        points.stream()
-            .allMatch(p -> List.of(p.magnitude(), p.resistance(), p.reactive()).equals(FREE));
-    if (free) {
-      labelled(text, "change", "no limit stops it at any of " + points.size() + " frequencies");
+    if (points.stream().allMatch(p -> isAlways(p, Amount.ANY))) {
+      labelled(text, "change", "no limit on it at any of " + points.size() + " frequencies");
+      return;
+    }
+    if (points.stream().allMatch(p -> isAlways(p, Amount.NONE))) {
+      labelled(text, "change", "no room at any of " + points.size() + " frequencies");
       return;
     }
     List<PointAllowance> shown = shown(points);
@@ -97,7 +98,10 @@ public final class AllowText {
     columns.lines(Page.WIDTH - 2).forEach(l -> line(text, "  " + l));
   }
 
-  private static final List<Amount> FREE = List.of(Amount.ANY, Amount.ANY, Amount.ANY);
+  private static boolean isAlways(PointAllowance point, Amount amount) {
+    return List.of(point.magnitude(), point.resistance(), point.reactive())
+        .equals(List.of(amount, amount, amount));
+  }
 
   /** Evenly chosen, the first and the last among them. */
   private static List<PointAllowance> shown(List<PointAllowance> points) {

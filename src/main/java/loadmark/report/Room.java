@@ -5,10 +5,10 @@ import java.math.MathContext;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import loadmark.allowance.Amount;
 import loadmark.allowance.Heaviest;
-import loadmark.network.Limit;
 import loadmark.network.Load;
 import loadmark.network.OnePort;
 import loadmark.network.OnePort.ElementKind;
@@ -28,24 +28,19 @@ final class Room {
 
   private Room() {}
 
-  /** {@code from 2.859 times its impedance on, line 12 stops it}. */
+  /** {@code fine from 2.859 times its impedance on (line 12)}. */
   static String heaviest(Load load, Heaviest heaviest) {
-    boolean shunt = load.placement() == Load.Placement.SHUNT;
-    Amount multiple = heaviest.multiple();
-    String stop = heaviest.stoppedBy().map(Room::stop).orElse("");
-    return switch (multiple.state()) {
-      case ANY -> "however heavy";
+    String line = heaviest.stoppedBy().map(l -> "line " + l.line()).orElse("");
+    return switch (heaviest.multiple().state()) {
+      case ANY -> "fine however heavy";
       case UNDETERMINED -> NOTHING;
-      case NONE -> "none, however light" + stop;
-      case NUMBER -> size(load, multiple.value(), shunt) + stop;
+      case NONE -> "none: " + line + " leaves no room for it";
+      case NUMBER -> "fine " + size(load, heaviest.multiple().value()) + " (" + line + ")";
     };
   }
 
-  private static String stop(Limit limit) {
-    return " (line " + limit.line() + ")";
-  }
-
-  private static String size(Load load, double multiple, boolean shunt) {
+  private static String size(Load load, double multiple) {
+    boolean shunt = load.placement() == Load.Placement.SHUNT;
     double impedance = shunt ? 1 / multiple : multiple;
     if (load.value() instanceof OnePort.Element element) {
       double value = element.value().nominal();
@@ -99,17 +94,21 @@ final class Room {
     boolean shunt = load.placement() == Load.Placement.SHUNT;
     if (heaviest.beside().isPresent() && !(load.value() instanceof OnePort.Element)) {
       Heaviest.Beside beside = heaviest.beside().get();
-      lines.add("beside its own resistance " + phrase(beside.capacitance(), "F", !shunt));
-      lines.add("beside its own capacitance " + phrase(beside.resistance(), "Ω", shunt));
+      lines.add(
+          "beside its own resistance "
+              + phrase(beside.capacitance(), ElementKind.CAPACITANCE, !shunt));
+      lines.add(
+          "beside its own capacitance "
+              + phrase(beside.resistance(), ElementKind.RESISTANCE, shunt));
     }
     return lines;
   }
 
-  private static String phrase(Amount amount, String unit, boolean least) {
+  private static String phrase(Amount amount, ElementKind kind, boolean least) {
     return switch (amount.state()) {
-      case NUMBER -> bound(amount.value(), unit, least);
-      case ANY -> "any " + unit;
-      case NONE -> "no " + unit;
+      case NUMBER -> "fine " + bound(amount.value(), unit(kind).orElseThrow(), least);
+      case ANY -> "any " + kind.name().toLowerCase(Locale.ROOT);
+      case NONE -> "no " + kind.name().toLowerCase(Locale.ROOT);
       case UNDETERMINED -> NOTHING;
     };
   }
